@@ -1,0 +1,92 @@
+//! Whether a case's temperatures and pressure lie where its fluid is known.
+
+use crate::fluids::{Fluid, StateError};
+use crate::geometry::Field;
+
+use super::fault::Fault;
+use super::fields::Fields;
+use super::model::{Case, Surface};
+
+/// Adds what the fluid's table refuses to `faults`.
+pub(super) fn check_temperatures(
+    case: &Case,
+    fields: &Fields,
+    fluid: &Fluid,
+    faults: &mut Vec<Fault>,
+) {
+    let ambient = case.ambient_temperature;
+    let (checked, what) = match case.surface {
+        Surface::Temperature(surface) => {
+            check_density_maximum(surface, ambient, fluid, faults);
+            (0.5 * (surface + ambient), "the film temperature")
+        }
+        Surface::HeatFlux(_) => (ambient, "the ambient temperature"),
+    };
+    let Err(error) = fluid.state(checked, case.pressure) else {
+        return;
+    };
+    let detail = format!(
+        "{what} is {checked} K in {} at {} Pa: {error}",
+        fluid.id(),
+        case.pressure
+    );
+    for field in blamed(fields, error) {
+        faults.push(Fault::at(
+            field,
+            "outside-table",
+            detail.clone() + &hint(field, fields),
+        ));
+    }
+}
+
+/// The fields that a caller would look at first.
+fn blamed(fields: &Fields, error: StateError) -> Vec<Field> {
+    if let StateError::PressureOutside { .. } = error {
+        let field = if fields.is_given(Field::Altitude) {
+            Field::Altitude
+        } else {
+            Field::Pressure
+        };
+        return vec![field];
+    }
+    let temperatures = [Field::SurfaceTemperature, Field::AmbientTemperature];
+    let given = temperatures
+        .into_iter()
+        .filter(|&field| fields.is_given(field));
+    let (bare, unit): (Vec<_>, Vec<_>) = given.partition(|&field| fields.is_bare(field));
+    match (bare.is_empty(), unit.first()) {
+        (true, Some(&first)) => vec![first],
+        _ => bare,
+    }
+}
+
+fn hint(field: Field, fields: &Fields) -> String {
+    match fields.number(field) {
+        Some(value)
+            if fields.is_bare(field) && field.kind() == Field::SurfaceTemperature.kind() =>
+        {
+            format!(
+                "; {} was read as {value} K; if degrees Celsius are meant, write \"{value} degC\"",
+                field.name()
+            )
+        }
+        _ => String::new(),
+    }
+}
+
+/// Refuses a surface and an ambient between which the buoyancy turns round.
+fn check_density_maximum(surface: f64, ambient: f64, fluid: &Fluid, faults: &mut Vec<Fault>) {
+    let Some(turn) = fluid.density_maximum() else {
+        return;
+    };
+    if surface.min(ambient) < turn && turn < surface.max(ambient) {
+        faults.push(Fault::at(
+            Field::SurfaceTemperature,
+            "density-maximum",
+            format!(
+                "surface {surface} K and ambient {ambient} K lie on both sides of {turn:.2} K, where {} is densest: part of the layer rises and part sinks, and no method here covers that; give two temperatures on one side",
+                fluid.id()
+            ),
+        ));
+    }
+}

@@ -1,0 +1,21 @@
+//! From raw fields to a case or to all its faults; answers and notes.
+
+mod answer;
+mod entries;
+mod fault;
+mod fields;
+mod fluid_check;
+mod model;
+mod note;
+mod size;
+
+pub use answer::{
+    Answer, Cell, Column, ColumnEntry, ColumnType, Heat, PROPERTIES, Property, Regime, Wanted,
+    answer_kind,
+};
+pub use entries::{Entries, Given, duplicate_field, shown, unknown_field};
+pub use fault::{CODES, Fault, pointer};
+pub use fields::Fields;
+pub use model::{Case, STANDARD_GRAVITY, STANDARD_PRESSURE, Surface};
+pub use note::{NoteCode, Notes, Severity};
+pub use size::Size;

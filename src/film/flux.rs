@@ -1,0 +1,60 @@
+//! The surface temperature that a known heat flux implies.
+
+use roots::{SimpleConvergency, find_root_brent};
+
+use crate::case::Case;
+use crate::fluids::Fluid;
+use crate::geometry::Extrapolate;
+
+use super::failure::Failure;
+use super::layer::Layer;
+use super::radiation;
+
+/// Temperatures closer than this, and fluxes smaller than this, are one.
+const TOLERANCE: f64 = 1e-10;
+
+/// The share of the film's temperature span that is kept off its ends, where rounding could leave the table.
+const MARGIN: f64 = 1e-9;
+
+/// Finds the surface temperature, K, at which convection and radiation carry a flux away.
+///
+/// # Errors
+/// No temperature within the fluid's table does.
+pub(super) fn surface_temperature(case: &Case, fluid: &Fluid, flux: f64) -> Result<f64, Failure> {
+    let (minimum, maximum) = span(case, fluid);
+    let excess =
+        |surface: f64| heat_flux(case, fluid, surface).map_or(f64::NAN, |heat| heat - flux);
+    let mut convergency = SimpleConvergency {
+        eps: TOLERANCE,
+        max_iter: 200,
+    };
+    find_root_brent(minimum, maximum, excess, &mut convergency)
+        .ok()
+        .filter(|surface| surface.is_finite())
+        .ok_or(Failure::Unsolved { minimum, maximum })
+}
+
+/// Surface temperatures whose film the fluid's table holds, on the ambient's side of the greatest density.
+fn span(case: &Case, fluid: &Fluid) -> (f64, f64) {
+    let ambient = case.ambient_temperature;
+    let (coldest, hottest) = fluid.temperatures_at(case.pressure);
+    let margin = MARGIN * (hottest - coldest);
+    let lowest = (2.0 * (coldest + margin) - ambient).max(1.0);
+    let highest = 2.0 * (hottest - margin) - ambient;
+    match fluid.density_maximum() {
+        Some(turn) if ambient < turn => (lowest, highest.min(turn)),
+        Some(turn) => (lowest.max(turn), highest),
+        None => (lowest, highest),
+    }
+}
+
+/// Heat flux that leaves a surface at a temperature, W/m2.
+fn heat_flux(case: &Case, fluid: &Fluid, surface: f64) -> Result<f64, Failure> {
+    let layer = Layer::new(case, fluid, surface)?;
+    let (_, coefficient) = layer.choose(Extrapolate::Any)?.result(case);
+    let radiative = case.emissivity.map_or(0.0, |emissivity| {
+        radiation::coefficient(emissivity, surface, case.surroundings_temperature)
+            * (surface - case.surroundings_temperature)
+    });
+    Ok(coefficient * (surface - case.ambient_temperature) + radiative)
+}

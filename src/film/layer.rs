@@ -1,0 +1,183 @@
+//! The layer of fluid next to a surface of known temperature, and the methods that serve it.
+
+use crate::case::Case;
+use crate::fluids::{Fluid, State, StateError};
+use crate::geometry::{Extrapolate, Facing};
+use crate::methods::{Groups, MethodId, RangeStatus, ReferenceTemperature, Side, Verdict};
+
+use super::failure::Failure;
+
+/// A surface temperature and what it makes of the fluid.
+#[derive(Clone, Copy)]
+pub(super) struct Layer<'a> {
+    case: &'a Case,
+    fluid: &'a Fluid,
+    surface: f64,
+    film: State,
+    /// Which way the layer pulls.
+    pub side: Side,
+}
+
+/// A method entered with a layer's groups.
+#[derive(Clone, Copy, Debug)]
+pub(super) struct Entered {
+    pub id: MethodId,
+    pub groups: Groups,
+    pub state: State,
+    pub verdict: Verdict,
+}
+
+impl Entered {
+    /// Nusselt number and coefficient.
+    pub fn result(&self, case: &Case) -> (f64, f64) {
+        let nusselt = (self.id.method().nusselt)(&self.groups);
+        (
+            nusselt,
+            nusselt * self.state.conductivity / case.size.characteristic_length,
+        )
+    }
+
+    fn is_within(&self) -> bool {
+        self.verdict.status == RangeStatus::Within
+    }
+
+    /// Whether the caller takes an answer so far out; the limit of no difference is always answered.
+    fn is_allowed(&self, extrapolate: Extrapolate) -> bool {
+        self.groups.rayleigh == 0.0
+            || match extrapolate {
+                Extrapolate::None => self.is_within(),
+                Extrapolate::Near => self.verdict.status != RangeStatus::Beyond,
+                Extrapolate::Any => true,
+            }
+    }
+}
+
+impl<'a> Layer<'a> {
+    /// The layer at a surface temperature.
+    pub fn new(case: &'a Case, fluid: &'a Fluid, surface: f64) -> Result<Self, StateError> {
+        let film = fluid.state(0.5 * (surface + case.ambient_temperature), case.pressure)?;
+        let rises = film.expansion * (surface - case.ambient_temperature) >= 0.0;
+        let side = match case.facing {
+            None => Side::Any,
+            Some(facing) if rises == (facing == Facing::Up) => Side::Unstable,
+            Some(_) => Side::Stable,
+        };
+        Ok(Layer {
+            case,
+            fluid,
+            surface,
+            film,
+            side,
+        })
+    }
+
+    /// The methods that serve it, the body's usual one first.
+    pub fn methods(&self) -> impl Iterator<Item = MethodId> + Clone {
+        MethodId::serving(self.case.geometry, self.case.heating(), self.side)
+    }
+
+    /// Enters a method, with the properties that it wants.
+    pub fn enter(&self, id: MethodId) -> Result<Entered, StateError> {
+        let method = id.method();
+        let case = self.case;
+        let state = match method.reference {
+            ReferenceTemperature::Film => self.film,
+            ReferenceTemperature::Weighted { .. } => {
+                let (properties, expansion) = method
+                    .reference
+                    .temperatures(self.surface, case.ambient_temperature);
+                State {
+                    expansion: self.fluid.state(expansion, case.pressure)?.expansion,
+                    ..self.fluid.state(properties, case.pressure)?
+                }
+            }
+        };
+        let difference = (self.surface - case.ambient_temperature).abs();
+        let viscosity = state.kinematic_viscosity();
+        let groups = Groups {
+            rayleigh: case.gravity
+                * state.expansion.abs()
+                * difference
+                * case.size.characteristic_length.powi(3)
+                / (viscosity * state.diffusivity()),
+            prandtl: state.prandtl(),
+            tilt: case.size.tilt,
+            slenderness: case.size.slenderness,
+            length_ratio: case.size.length_ratio,
+        };
+        let verdict = method.verdict(&groups);
+        Ok(Entered {
+            id,
+            groups,
+            state,
+            verdict,
+        })
+    }
+
+    /// The method asked for, or the automatic choice: the body's usual method within and, where that is allowed, near its range; else the first other within; else the first other near.
+    pub fn choose(&self, extrapolate: Extrapolate) -> Result<Entered, Failure> {
+        if let Some(id) = self.case.method {
+            if !self.methods().any(|other| other == id) {
+                return Err(Failure::Side {
+                    method: id,
+                    side: self.side,
+                });
+            }
+            let entered = self.enter(id)?;
+            return self.allow(entered, extrapolate);
+        }
+        let usual = self.usual()?;
+        if usual.is_within()
+            || usual.verdict.status == RangeStatus::Near && usual.is_allowed(extrapolate)
+        {
+            return Ok(usual);
+        }
+        let others = || self.methods().skip(1).filter_map(|id| self.enter(id).ok());
+        let within = others().find(Entered::is_within);
+        let near = || others().find(|other| other.verdict.status == RangeStatus::Near);
+        let best = within.or_else(near).unwrap_or(usual);
+        self.allow(
+            if best.is_allowed(extrapolate) {
+                best
+            } else {
+                usual
+            },
+            extrapolate,
+        )
+    }
+
+    /// The body's usual method for this layer.
+    pub fn usual(&self) -> Result<Entered, Failure> {
+        // The registry's tests prove that every body, heating and side has a method.
+        let id = self.methods().next().unwrap_or(MethodId::ALL[0]);
+        Ok(self.enter(id)?)
+    }
+
+    /// Smallest and largest coefficient of a chosen method and all others within range.
+    pub fn spread(&self, chosen: MethodId, coefficient: f64) -> (f64, f64) {
+        self.others(chosen)
+            .filter(Entered::is_within)
+            .map(|entered| entered.result(self.case).1)
+            .fold((coefficient, coefficient), |(low, high), other| {
+                (low.min(other), high.max(other))
+            })
+    }
+
+    /// Every other method that serves the layer and whose properties are known.
+    pub fn others(&self, chosen: MethodId) -> impl Iterator<Item = Entered> {
+        self.methods()
+            .filter(move |&id| id != chosen)
+            .filter_map(|id| self.enter(id).ok())
+    }
+
+    fn allow(&self, entered: Entered, extrapolate: Extrapolate) -> Result<Entered, Failure> {
+        if entered.is_allowed(extrapolate) {
+            Ok(entered)
+        } else {
+            Err(Failure::Range {
+                method: entered.id,
+                groups: entered.groups,
+            })
+        }
+    }
+}

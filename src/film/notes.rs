@@ -1,0 +1,144 @@
+//! Which notes an answer earns.
+
+use crate::case::{Answer, Case, NoteCode, Notes, Surface};
+use crate::fluids::{Fluid, Phase};
+use crate::geometry::Geometry;
+use crate::methods::curvature_factor;
+
+use super::layer::Entered;
+
+/// Below this share of the side, two end faces are not worth a note: 10 diameters of length.
+const SHORT_CYLINDER: f64 = 10.0;
+/// A layer that gains less than this by bending around a cylinder is flat.
+const THIN_CYLINDER: f64 = 1.05;
+/// Below this emissivity an infrared thermometer at its usual setting misleads.
+const SHINY: f64 = 0.5;
+/// The methods disagree when the largest coefficient exceeds the smallest by more than this share.
+const DISAGREEMENT: f64 = 0.20;
+/// Viscosity ratio of liquids, and temperature ratio of gases, beyond which one reference temperature is too simple.
+const STRONG_VARIATION: f64 = 2.0;
+/// A film closer than this to the greatest density, K, is told.
+const DENSITY_MAXIMUM_SPAN: f64 = 6.0;
+/// Ambient temperatures outside this, K, are unlikely in a plant.
+const PLAUSIBLE_AMBIENT: std::ops::RangeInclusive<f64> = 220.0..=350.0;
+/// Contact for hours can burn from here, K: ISO 13732-1, 43 degrees Celsius (from memory).
+const BURNS_FROM: f64 = 316.15;
+/// Grashof numbers between which an upright layer is neither laminar nor turbulent.
+pub(super) const UPRIGHT_TRANSITION: (f64, f64) = (1e8, 3e10);
+
+/// The notes of an answer that is otherwise complete.
+pub(super) fn notes(case: &Case, fluid: &Fluid, entered: &Entered, answer: &Answer) -> Notes {
+    let mut notes = Notes::default();
+    method_notes(case, entered, answer, &mut notes);
+    fluid_notes(case, fluid, answer, &mut notes);
+    surface_notes(case, fluid, answer, &mut notes);
+    notes
+}
+
+fn method_notes(case: &Case, entered: &Entered, answer: &Answer, notes: &mut Notes) {
+    let verdict = entered.verdict;
+    let moves = answer.rayleigh > 0.0;
+    notes.add_if(
+        moves && verdict.rayleigh_below,
+        NoteCode::RayleighBelowRange,
+    );
+    notes.add_if(verdict.rayleigh_above, NoteCode::RayleighAboveRange);
+    notes.add_if(verdict.prandtl_outside, NoteCode::PrandtlOutsideRange);
+    notes.add_if(moves && verdict.shape_outside, NoteCode::ShapeOutsideRange);
+    notes.add_if(answer.method_step != 0.0, NoteCode::MethodStep);
+    let upright = matches!(
+        case.geometry,
+        Geometry::VerticalPlate | Geometry::InclinedPlate | Geometry::VerticalCylinder
+    );
+    let (laminar_to, turbulent_from) = UPRIGHT_TRANSITION;
+    let grashof = answer.rayleigh / answer.prandtl;
+    notes.add_if(
+        upright && (laminar_to..=turbulent_from).contains(&grashof),
+        NoteCode::Transition,
+    );
+    if let (Some(low), Some(high)) = (answer.low, answer.high) {
+        notes.add_if(high > low * (1.0 + DISAGREEMENT), NoteCode::MethodsDisagree);
+    }
+    if case.geometry == Geometry::VerticalCylinder {
+        let bends = moves && curvature_factor(&entered.groups) > THIN_CYLINDER;
+        notes.add_if(bends, NoteCode::ThinCylinder);
+    }
+    let cylinder = matches!(
+        case.geometry,
+        Geometry::VerticalCylinder | Geometry::HorizontalCylinder
+    );
+    let slenderness = case.size.slenderness;
+    notes.add_if(
+        cylinder && slenderness > 0.0 && slenderness < SHORT_CYLINDER,
+        NoteCode::EndsNotCounted,
+    );
+    notes.add_if(!moves, NoteCode::EqualTemperatures);
+}
+
+fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
+    let (surface, ambient) = (answer.surface_temperature, case.ambient_temperature);
+    notes.add_if(
+        fluid.near_edge(answer.film_temperature),
+        NoteCode::TableEdge,
+    );
+    let varies = match fluid.phase() {
+        Phase::Gas => surface.max(ambient) > STRONG_VARIATION * surface.min(ambient),
+        Phase::Liquid => match (
+            fluid.state(surface, case.pressure),
+            fluid.state(ambient, case.pressure),
+        ) {
+            (Ok(at_surface), Ok(at_ambient)) => {
+                let ratio = at_surface.viscosity / at_ambient.viscosity;
+                ratio > STRONG_VARIATION || ratio < 1.0 / STRONG_VARIATION
+            }
+            _ => true,
+        },
+    };
+    notes.add_if(varies, NoteCode::StrongPropertyVariation);
+    if let Some(turn) = fluid.density_maximum() {
+        let near = [surface, ambient, answer.film_temperature]
+            .iter()
+            .any(|temperature| (temperature - turn).abs() <= DENSITY_MAXIMUM_SPAN);
+        notes.add_if(near, NoteCode::DensityMaximum);
+    }
+    let liquid = fluid.phase() == Phase::Liquid;
+    let changes = fluid.is_past_saturation(surface, case.pressure);
+    notes.add_if(changes && liquid, NoteCode::MayBoil);
+    notes.add_if(changes && !liquid, NoteCode::MayCondense);
+    let limits = fluid.limits();
+    let is_past = |limit: Option<f64>, past: fn(f64, f64) -> bool| {
+        limit.is_some_and(|limit| past(surface, limit) || past(ambient, limit))
+    };
+    notes.add_if(
+        is_past(limits.freezing, |t, limit| t < limit),
+        NoteCode::MayFreeze,
+    );
+    notes.add_if(
+        is_past(limits.flash_point, |t, limit| t >= limit),
+        NoteCode::AboveFlashPoint,
+    );
+}
+
+fn surface_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
+    let gas = fluid.phase() == Phase::Gas;
+    notes.add_if(
+        gas && case.emissivity.is_none(),
+        NoteCode::RadiationNotCounted,
+    );
+    let measured = matches!(case.surface, Surface::Temperature(_));
+    notes.add_if(
+        measured && case.emissivity.is_some_and(|emissivity| emissivity < SHINY),
+        NoteCode::LowEmissivityReading,
+    );
+    let hottest = answer
+        .surface_temperature_max
+        .unwrap_or(answer.surface_temperature);
+    notes.add_if(
+        hottest.max(answer.surface_temperature) >= BURNS_FROM,
+        NoteCode::BurnHazard,
+    );
+    notes.add_if(
+        case.bare_ambient && !PLAUSIBLE_AMBIENT.contains(&case.ambient_temperature),
+        NoteCode::BareNumberAsKelvin,
+    );
+}

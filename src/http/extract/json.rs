@@ -1,0 +1,134 @@
+//! A case in JSON.
+
+use std::borrow::Cow;
+use std::fmt;
+
+use serde::de::{Deserializer, MapAccess, Visitor};
+use serde_json::error::Category;
+use serde_json::value::RawValue;
+
+use crate::case::{Fault, Given, duplicate_field};
+use crate::http::problem::{Problem, ProblemKind};
+use crate::quantity::{Kind, UnitChoice};
+
+use super::{FilmInput, UNIT_MEMBERS, field_kind, keep_choice, result_kind};
+
+/// Reads one case; what is wrong with its members stays in the input's faults.
+///
+/// # Errors
+/// The bytes are no JSON, or JSON that is no object.
+pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
+    let members = read_members(bytes).map_err(|error| match error.classify() {
+        Category::Data => Problem::invalid(vec![Fault::under(
+            &[],
+            "wrong-type",
+            "the body is not a JSON object; send one case as an object of named fields",
+        )]),
+        _ => Problem::new(ProblemKind::Malformed, format!("not JSON: {error}")),
+    })?;
+    let mut input = FilmInput::default();
+    let mut chosen: [Option<&RawValue>; 2] = [None; 2];
+    for (name, raw) in &members {
+        if let Some(place) = UNIT_MEMBERS.iter().position(|member| member == name) {
+            if chosen[place].replace(raw).is_some() {
+                input.faults.push(duplicate_field(name));
+            }
+            continue;
+        }
+        if let Err(fault) = input.entries.put(name, read_value(raw), &UNIT_MEMBERS) {
+            input.faults.push(fault);
+        }
+    }
+    let [units, answer_units] = chosen;
+    input.units = read_choice(units, UNIT_MEMBERS[0], field_kind, &mut input.faults);
+    input.answer_units = read_choice(
+        answer_units,
+        UNIT_MEMBERS[1],
+        result_kind,
+        &mut input.faults,
+    );
+    Ok(input)
+}
+
+type Members<'a> = Vec<(Cow<'a, str>, &'a RawValue)>;
+
+/// The members of an object in their order, duplicates and all.
+fn read_members(bytes: &[u8]) -> serde_json::Result<Members<'_>> {
+    struct MembersVisitor;
+
+    impl<'de> Visitor<'de> for MembersVisitor {
+        type Value = Members<'de>;
+
+        fn expecting(&self, out: &mut fmt::Formatter) -> fmt::Result {
+            out.write_str("an object")
+        }
+
+        fn visit_map<A: MapAccess<'de>>(self, mut map: A) -> Result<Self::Value, A::Error> {
+            let mut members = Vec::with_capacity(16);
+            while let Some(key) = map.next_key::<Key>()? {
+                members.push((key.0, map.next_value()?));
+            }
+            Ok(members)
+        }
+    }
+
+    let mut deserializer = serde_json::Deserializer::from_slice(bytes);
+    let members = deserializer.deserialize_map(MembersVisitor)?;
+    deserializer.end()?;
+    Ok(members)
+}
+
+/// A member's name, borrowed where it has no escapes.
+#[derive(serde::Deserialize)]
+struct Key<'a>(#[serde(borrow)] Cow<'a, str>);
+
+/// A raw value's meaning as far as JSON goes; null is *not given*.
+fn read_value(raw: &RawValue) -> Option<Given<'_>> {
+    let text = raw.get();
+    Some(match text.as_bytes().first() {
+        Some(b'n') => return None,
+        Some(b'"') => match serde_json::from_str::<Key>(text) {
+            Ok(key) => Given::Text(key.0),
+            Err(_) => Given::Other("a text with an escape that means nothing"),
+        },
+        Some(b't' | b'f') => Given::Other("true or false"),
+        Some(b'[') => Given::Other("a list"),
+        Some(b'{') => Given::Other("an object"),
+        // Rust reads every number that JSON's grammar allows; too large a one becomes infinite.
+        _ => Given::Number(text.parse().unwrap_or(f64::NAN)),
+    })
+}
+
+fn read_choice(
+    raw: Option<&RawValue>,
+    member: &'static str,
+    kind_of: fn(&str) -> Option<Kind>,
+    faults: &mut Vec<Fault>,
+) -> UnitChoice {
+    let Some(raw) = raw.filter(|raw| raw.get() != "null") else {
+        return UnitChoice::default();
+    };
+    let pairs: Option<Vec<_>> = read_members(raw.get().as_bytes()).ok().and_then(|members| {
+        let text = |(key, raw): (Cow<'_, str>, &RawValue)| match read_value(raw) {
+            Some(Given::Text(unit)) => Some((key.into_owned(), unit.into_owned())),
+            _ => None,
+        };
+        members.into_iter().map(text).collect()
+    });
+    match pairs {
+        Some(pairs) => {
+            let pairs = pairs
+                .iter()
+                .map(|(key, unit)| (key.as_str(), unit.as_str()));
+            keep_choice(UnitChoice::parse_pairs(pairs, &kind_of), member, faults)
+        }
+        None => {
+            faults.push(Fault::under(
+                &[member],
+                "wrong-type",
+                format!("{member} is not an object of unit texts; for example {{\"temperature\": \"degC\"}}"),
+            ));
+            UnitChoice::default()
+        }
+    }
+}

@@ -1,0 +1,211 @@
+//! `/v1/methods`: the registry of published methods.
+
+use axum::http::HeaderMap;
+use axum::response::Response;
+use serde::Serialize;
+use utoipa::ToSchema;
+
+use crate::http::extract::AcceptsJson;
+use crate::http::problem::Problem;
+use crate::http::reply::{json, tagged};
+use crate::methods::{Method, MethodId, Range, Scatter};
+
+/// All methods.
+#[derive(Serialize, ToSchema)]
+pub struct Methods {
+    methods: Vec<MethodView>,
+}
+
+/// One published method.
+#[derive(Serialize, ToSchema)]
+pub struct MethodView {
+    /// Its id in requests.
+    #[schema(example = "horizontal-cylinder-churchill-chu")]
+    id: &'static str,
+    /// The body it is for.
+    #[schema(example = "horizontal-cylinder")]
+    geometry: &'static str,
+    /// The heating it is for: isothermal, uniform-flux or either.
+    #[schema(example = "either")]
+    heating: &'static str,
+    /// The side of a plate it is for: any, unstable (warm facing up, cold facing down) or stable.
+    #[schema(example = "any")]
+    side: &'static str,
+    /// Whether it is its body's automatic choice while its range allows.
+    automatic: bool,
+    /// The formula as text.
+    #[schema(example = "Nu = 0.53 Ra^(1/4)")]
+    formula: &'static str,
+    /// Where it was published.
+    source: SourceView,
+    /// Where it holds; all bounds together.
+    ranges: Vec<RangeView>,
+    /// Where the fluid's properties are taken.
+    #[schema(example = "film: mean of surface and ambient")]
+    reference_temperature: String,
+    /// The length in its Nusselt and Rayleigh numbers.
+    #[schema(example = "outside diameter")]
+    characteristic_length: &'static str,
+    /// The spread of measurements about it.
+    scatter: ScatterView,
+    /// Open readings of the source, and how far it is from others; empty when there is nothing to say.
+    #[schema(example = "")]
+    remark: &'static str,
+    /// A worked figure that the service reproduces.
+    example: ExampleView,
+}
+
+/// Where a method was published.
+#[derive(Serialize, ToSchema)]
+#[schema(as = MethodSource)]
+pub struct SourceView {
+    /// Authors.
+    #[schema(example = "Churchill, S. W.; Chu, H. H. S.")]
+    authors: &'static str,
+    /// Year of publication.
+    #[schema(example = 1975)]
+    year: u16,
+    /// Journal and volume, or book.
+    #[schema(example = "Int. J. Heat Mass Transfer 18")]
+    work: &'static str,
+    /// Pages, chapter or equation.
+    #[schema(example = "1049-1053")]
+    locator: &'static str,
+}
+
+/// The band of one quantity, both ends included.
+#[derive(Serialize, ToSchema)]
+#[schema(as = MethodRange)]
+pub struct RangeView {
+    /// What is bounded.
+    #[schema(example = "rayleigh")]
+    quantity: &'static str,
+    /// Its symbol.
+    #[schema(example = "Ra")]
+    symbol: &'static str,
+    /// Lower end.
+    #[schema(example = 1e-5)]
+    minimum: f64,
+    /// Upper end; null where the source sets none.
+    #[schema(example = 1e12)]
+    maximum: Option<f64>,
+    /// Whether the formula tends to the right limit below the band and is answered there with a note.
+    limit_below: bool,
+}
+
+/// The spread of measurements about a method, a fraction.
+#[derive(Serialize, ToSchema)]
+#[schema(as = MethodScatter)]
+pub struct ScatterView {
+    /// While laminar.
+    #[schema(example = 0.15)]
+    laminar: f64,
+    /// Beyond.
+    #[schema(example = 0.25)]
+    turbulent: f64,
+    /// Whether the source states it; common practice otherwise.
+    stated: bool,
+}
+
+/// A worked figure.
+#[derive(Serialize, ToSchema)]
+#[schema(as = MethodExample)]
+pub struct ExampleView {
+    /// Rayleigh number.
+    #[schema(example = 1869000.0)]
+    rayleigh: f64,
+    /// Prandtl number.
+    #[schema(example = 0.7241)]
+    prandtl: f64,
+    /// Angle from the vertical, degrees.
+    #[schema(example = 0.0)]
+    tilt: f64,
+    /// Height over diameter of an upright cylinder.
+    #[schema(example = 0.0)]
+    slenderness: f64,
+    /// Area over perimeter of an inclined plate, over its length.
+    #[schema(example = 0.0)]
+    length_ratio: f64,
+    /// The Nusselt number.
+    #[schema(example = 17.4)]
+    nusselt: f64,
+    /// Where the figure comes from.
+    #[schema(example = "Cengel, Heat Transfer, example 9-1")]
+    from: &'static str,
+}
+
+impl MethodView {
+    fn new(id: MethodId) -> Self {
+        let Method {
+            geometry,
+            heating,
+            side,
+            formula,
+            source,
+            ranges,
+            reference,
+            scatter,
+            remark,
+            example,
+            ..
+        } = *id.method();
+        let groups = example.groups;
+        MethodView {
+            id: id.as_str(),
+            geometry: geometry.as_str(),
+            heating: heating.as_str(),
+            side: side.as_str(),
+            automatic: id.is_automatic(),
+            formula,
+            source: SourceView {
+                authors: source.authors,
+                year: source.year,
+                work: source.work,
+                locator: source.locator,
+            },
+            ranges: ranges.iter().map(RangeView::new).collect(),
+            reference_temperature: reference.text(),
+            characteristic_length: geometry.entry().characteristic_length,
+            scatter: ScatterView {
+                laminar: scatter.fraction(true),
+                turbulent: scatter.fraction(false),
+                stated: matches!(scatter, Scatter::Stated(_)),
+            },
+            remark,
+            example: ExampleView {
+                rayleigh: groups.rayleigh,
+                prandtl: groups.prandtl,
+                tilt: groups.tilt,
+                slenderness: groups.slenderness,
+                length_ratio: groups.length_ratio,
+                nusselt: example.nusselt,
+                from: example.from,
+            },
+        }
+    }
+}
+
+impl RangeView {
+    fn new(range: &Range) -> Self {
+        RangeView {
+            quantity: range.quantity.as_str(),
+            symbol: range.quantity.symbol(),
+            minimum: range.minimum,
+            maximum: range.maximum.is_finite().then_some(range.maximum),
+            limit_below: range.limit_below,
+        }
+    }
+}
+
+/// All methods, with formula, source and ranges.
+#[utoipa::path(
+    get, path = "/v1/methods", operation_id = "list_methods", tag = "catalogue",
+    responses((status = 200, description = "all methods", body = Methods))
+)]
+pub async fn list_methods(_accepts: AcceptsJson, headers: HeaderMap) -> Result<Response, Problem> {
+    let methods = MethodId::ALL
+        .iter()
+        .map(|&id| MethodView::new(id))
+        .collect();
+    Ok(tagged(json(&Methods { methods })?, &headers))
+}

@@ -1,0 +1,42 @@
+//! What all handlers share: the fluids and the limits. Nothing in it changes.
+
+use std::time::Duration;
+
+use crate::fluids::Fluids;
+
+/// What a request may take.
+#[derive(Clone, Copy, Debug)]
+pub struct RequestLimits {
+    /// Bytes of a body.
+    pub body_bytes: usize,
+    /// Time for a body to arrive.
+    pub body_time: Duration,
+}
+
+impl Default for RequestLimits {
+    fn default() -> Self {
+        RequestLimits {
+            body_bytes: 1 << 20,
+            body_time: Duration::from_secs(30),
+        }
+    }
+}
+
+/// The state behind the routes.
+#[derive(Clone, Copy)]
+pub struct Service {
+    /// The fluids that requests can name.
+    pub fluids: &'static Fluids,
+    /// What a request may take.
+    pub limits: RequestLimits,
+}
+
+impl Service {
+    /// The built-in fluids with these limits.
+    pub fn new(limits: RequestLimits) -> Self {
+        Service {
+            fluids: Fluids::built_in(),
+            limits,
+        }
+    }
+}

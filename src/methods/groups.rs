@@ -1,0 +1,293 @@
+//! Dimensionless groups, and the ranges of them in which a method holds.
+
+use std::fmt;
+
+use crate::geometry::choice;
+
+/// What a formula sees of a case.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct Groups {
+    /// Rayleigh number on the body's characteristic length.
+    pub rayleigh: f64,
+    /// Prandtl number.
+    pub prandtl: f64,
+    /// Angle between an inclined surface and the vertical, degrees.
+    pub tilt: f64,
+    /// Height of an upright cylinder over its diameter.
+    pub slenderness: f64,
+    /// Area over perimeter of an inclined plate, over its length along the slope.
+    pub length_ratio: f64,
+}
+
+impl Groups {
+    /// Rayleigh and Prandtl numbers alone, for bodies that need no more.
+    pub const fn new(rayleigh: f64, prandtl: f64) -> Self {
+        Groups {
+            rayleigh,
+            prandtl,
+            tilt: 0.0,
+            slenderness: 0.0,
+            length_ratio: 0.0,
+        }
+    }
+
+    /// The same with an angle from the vertical, degrees.
+    pub const fn tilted(self, tilt: f64) -> Self {
+        Groups { tilt, ..self }
+    }
+
+    /// The same with another Rayleigh number.
+    pub const fn at_rayleigh(self, rayleigh: f64) -> Self {
+        Groups { rayleigh, ..self }
+    }
+
+    /// Rayleigh number with the part of gravity that lies along an inclined surface.
+    pub fn rayleigh_along(&self) -> f64 {
+        self.rayleigh * self.tilt.to_radians().cos()
+    }
+
+    /// Curvature of the boundary layer on an upright cylinder, `32^(1/2) Gr_H^(-1/4) H/D`.
+    ///
+    /// # Source
+    /// Cebeci 1974, 5th Int. Heat Transfer Conf. 3, 15-19.
+    pub fn curvature(&self) -> f64 {
+        32_f64.sqrt() * (self.rayleigh / self.prandtl).powf(-0.25) * self.slenderness
+    }
+}
+
+choice! {
+    /// A quantity that a range bounds.
+    Quantity {
+        /// Rayleigh number.
+        Rayleigh = "rayleigh",
+        /// Rayleigh number with gravity along the slope.
+        RayleighAlong = "rayleigh_along_slope",
+        /// Prandtl number.
+        Prandtl = "prandtl",
+        /// Angle from the vertical, degrees.
+        Tilt = "tilt_from_vertical",
+        /// Curvature of the boundary layer on an upright cylinder.
+        Curvature = "curvature",
+    }
+}
+
+choice! {
+    /// How a case lies to a method's range.
+    RangeStatus {
+        /// Inside.
+        Within = "within",
+        /// Outside, by no more than a decade in Rayleigh number, a factor 1.5 in Prandtl number and shape, 5 degrees in tilt.
+        Near = "near",
+        /// Farther out.
+        Beyond = "beyond",
+    }
+}
+
+impl Quantity {
+    /// Its value for a case.
+    pub fn of(self, groups: &Groups) -> f64 {
+        match self {
+            Quantity::Rayleigh => groups.rayleigh,
+            Quantity::RayleighAlong => groups.rayleigh_along(),
+            Quantity::Prandtl => groups.prandtl,
+            Quantity::Tilt => groups.tilt,
+            Quantity::Curvature => groups.curvature(),
+        }
+    }
+
+    /// The symbol in ranges that people read.
+    pub fn symbol(self) -> &'static str {
+        match self {
+            Quantity::Rayleigh => "Ra",
+            Quantity::RayleighAlong => "Ra cos(tilt)",
+            Quantity::Prandtl => "Pr",
+            Quantity::Tilt => "tilt from vertical",
+            Quantity::Curvature => "32^(1/2) Gr^(-1/4) H/D",
+        }
+    }
+
+    /// The widest value below and above a bound that still counts as near it.
+    fn near(self, bound: f64) -> (f64, f64) {
+        match self {
+            Quantity::Rayleigh | Quantity::RayleighAlong => (bound / 10.0, bound * 10.0),
+            Quantity::Prandtl | Quantity::Curvature => (bound / 1.5, bound * 1.5),
+            Quantity::Tilt => (bound - 5.0, bound + 5.0),
+        }
+    }
+
+    /// What lies outside when this quantity does.
+    fn aspect(self) -> Aspect {
+        match self {
+            Quantity::Rayleigh | Quantity::RayleighAlong => Aspect::Rayleigh,
+            Quantity::Prandtl => Aspect::Prandtl,
+            Quantity::Tilt | Quantity::Curvature => Aspect::Shape,
+        }
+    }
+}
+
+enum Aspect {
+    Rayleigh,
+    Prandtl,
+    Shape,
+}
+
+/// The band of one quantity in which a method holds, both ends included.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct Range {
+    /// What is bounded.
+    pub quantity: Quantity,
+    /// Lower end.
+    pub minimum: f64,
+    /// Upper end, infinite where the source sets none.
+    pub maximum: f64,
+    /// Whether the formula tends to the right limit below the band, so that any value below counts as near it.
+    pub limit_below: bool,
+}
+
+impl Range {
+    /// A band with two ends.
+    pub const fn between(quantity: Quantity, minimum: f64, maximum: f64) -> Self {
+        Range {
+            quantity,
+            minimum,
+            maximum,
+            limit_below: false,
+        }
+    }
+
+    /// A band without an upper end.
+    pub const fn at_least(quantity: Quantity, minimum: f64) -> Self {
+        Self::between(quantity, minimum, f64::INFINITY)
+    }
+
+    /// The same band of a formula that tends to the right limit below it.
+    pub const fn with_limit_below(self) -> Self {
+        Range {
+            limit_below: true,
+            ..self
+        }
+    }
+
+    /// What is outside in words, if the groups are.
+    pub fn breach(&self, groups: &Groups) -> Option<String> {
+        let value = self.quantity.of(groups);
+        let outside = self.status(value) != RangeStatus::Within;
+        outside.then(|| {
+            format!(
+                "{} is {}, outside {self}",
+                self.quantity.symbol(),
+                shown(value)
+            )
+        })
+    }
+
+    fn status(&self, value: f64) -> RangeStatus {
+        let (lowest, _) = self.quantity.near(self.minimum);
+        let (_, highest) = self.quantity.near(self.maximum);
+        if value >= self.minimum && value <= self.maximum {
+            RangeStatus::Within
+        } else if value < self.minimum && (self.limit_below || value >= lowest)
+            || value > self.maximum && value <= highest
+        {
+            RangeStatus::Near
+        } else {
+            RangeStatus::Beyond
+        }
+    }
+}
+
+impl fmt::Display for Range {
+    fn fmt(&self, out: &mut fmt::Formatter<'_>) -> fmt::Result {
+        let minimum = shown(self.minimum);
+        if self.maximum.is_finite() {
+            write!(out, "{minimum} to {}", shown(self.maximum))
+        } else {
+            write!(out, "{minimum} and above")
+        }
+    }
+}
+
+/// A group in a sentence: three figures, with an exponent when it is far from one.
+fn shown(value: f64) -> String {
+    if value == 0.0 || (0.01..1e4).contains(&value.abs()) {
+        let rounded: f64 = format!("{value:.2e}").parse().unwrap_or(value);
+        rounded.to_string()
+    } else {
+        let text = format!("{value:.2e}");
+        text.replace(".00e", "e").replace("0e", "e")
+    }
+}
+
+/// Where a case lies to all ranges of a method.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub struct Verdict {
+    /// The worst of all.
+    pub status: RangeStatus,
+    /// A Rayleigh number is too small.
+    pub rayleigh_below: bool,
+    /// A Rayleigh number is too large.
+    pub rayleigh_above: bool,
+    /// The Prandtl number is outside.
+    pub prandtl_outside: bool,
+    /// A tilt or a proportion is outside.
+    pub shape_outside: bool,
+}
+
+impl Verdict {
+    /// Judges a case by a method's ranges.
+    pub fn of(ranges: &[Range], groups: &Groups) -> Self {
+        let mut verdict = Verdict {
+            status: RangeStatus::Within,
+            rayleigh_below: false,
+            rayleigh_above: false,
+            prandtl_outside: false,
+            shape_outside: false,
+        };
+        for range in ranges {
+            let value = range.quantity.of(groups);
+            let status = range.status(value);
+            if status == RangeStatus::Within {
+                continue;
+            }
+            verdict.status = verdict.status.max(status);
+            match range.quantity.aspect() {
+                Aspect::Rayleigh if value < range.minimum => verdict.rayleigh_below = true,
+                Aspect::Rayleigh => verdict.rayleigh_above = true,
+                Aspect::Prandtl => verdict.prandtl_outside = true,
+                Aspect::Shape => verdict.shape_outside = true,
+            }
+        }
+        verdict
+    }
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn a_decade_of_rayleigh_is_near() {
+        let range = Range::between(Quantity::Rayleigh, 1e4, 1e9);
+        let status = |value| range.status(value);
+        assert_eq!(status(1e4), RangeStatus::Within);
+        assert_eq!(status(1e9), RangeStatus::Within);
+        assert_eq!(status(1e3), RangeStatus::Near);
+        assert_eq!(status(1e10), RangeStatus::Near);
+        assert_eq!(status(9.9e2), RangeStatus::Beyond);
+        assert_eq!(status(1.1e10), RangeStatus::Beyond);
+        assert_eq!(range.with_limit_below().status(0.0), RangeStatus::Near);
+    }
+
+    #[test]
+    fn a_verdict_is_the_worst_of_its_ranges_and_names_each() {
+        let ranges = [
+            Range::between(Quantity::Rayleigh, 1e4, 1e9),
+            Range::at_least(Quantity::Prandtl, 0.6),
+            Range::between(Quantity::Tilt, 0.0, 60.0),
+        ];
+        let verdict = Verdict::of(&ranges, &Groups::new(2e9, 0.1).tilted(64.0));
+        assert_eq!(verdict.status, RangeStatus::Beyond);
+        assert!(verdict.rayleigh_above && verdict.prandtl_outside && verdict.shape_outside);
+        assert!(!verdict.rayleigh_below);
+    }
+}
