@@ -295,15 +295,16 @@ pub const PROPERTIES: &[Property] = &[
     },
 ];
 
-/// The kind of quantity that a name in an answer stands for.
-pub fn answer_kind(name: &str) -> Option<Kind> {
-    let column = Column::from_name(name).and_then(|column| column.entry().holds.kind());
-    column.or_else(|| {
-        PROPERTIES
-            .iter()
-            .find(|property| property.name == name)
-            .map(|property| property.kind)
-    })
+/// The names of all figures in an answer with their kinds.
+pub fn answer_kinds() -> impl Iterator<Item = (&'static str, Kind)> {
+    let columns = Column::ALL.iter().filter_map(|column| {
+        let entry = column.entry();
+        Some((entry.name, entry.holds.kind()?))
+    });
+    let properties = PROPERTIES
+        .iter()
+        .map(|property| (property.name, property.kind));
+    columns.chain(properties)
 }
 
 /// A set of columns.
@@ -342,9 +343,12 @@ mod tests {
     }
 
     #[test]
-    fn no_property_has_a_columns_name_and_another_kind() {
-        for property in PROPERTIES {
-            assert_eq!(answer_kind(property.name), Some(property.kind));
+    fn a_name_stands_for_one_kind() {
+        for (name, kind) in answer_kinds() {
+            assert!(
+                answer_kinds().all(|(other, its)| other != name || its == kind),
+                "{name}"
+            );
         }
     }
 }

@@ -43,6 +43,12 @@ pub const CODES: &[(&str, &str)] = &[
     ("wrong-kind", "the unit measures something else"),
     ("not-finite", "the number is not finite"),
     (
+        "unknown-key",
+        "a choice of units names no field, figure or kind",
+    ),
+    ("duplicate-key", "a choice of units names one thing twice"),
+    ("not-a-pair", "a choice of units is not a list of name:unit"),
+    (
         "outside-limits",
         "the number is outside what the field accepts",
     ),

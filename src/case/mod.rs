@@ -11,7 +11,7 @@ mod size;
 
 pub use answer::{
     Answer, Cell, Column, ColumnEntry, ColumnType, Heat, PROPERTIES, Property, Regime, Wanted,
-    answer_kind,
+    answer_kinds,
 };
 pub use entries::{Entries, Given, duplicate_field, shown, unknown_field};
 pub use fault::{CODES, Fault, pointer};

@@ -89,7 +89,7 @@ fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
         ) {
             (Ok(at_surface), Ok(at_ambient)) => {
                 let ratio = at_surface.viscosity / at_ambient.viscosity;
-                ratio > STRONG_VARIATION || ratio < 1.0 / STRONG_VARIATION
+                !(1.0 / STRONG_VARIATION..=STRONG_VARIATION).contains(&ratio)
             }
             _ => true,
         },

@@ -40,10 +40,10 @@ pub static CHURCHILL_CHU: Method = Method {
     scatter: Scatter::CommonPractice,
     remark: "Above the exact laminar solution by 1.5 % at Ra 1e6, 8 % at 1e7, 18 % at 1e8 and 34 % at 1e9 (Pr 0.7). Tends to 0.68 as Ra tends to 0.",
     example: Example {
-        groups: Groups::new(2.787e9, 0.7309),
-        nusselt: 169.5,
+        groups: Groups::new(7.65e8, 0.7202),
+        nusselt: 113.3,
         figures: 4,
-        from: "Cengel, Heat Transfer, problem 9-97",
+        from: "Cengel, Heat Transfer, example 9-2 (from memory)",
     },
     edges: &[],
     nusselt: |g| full_range(g, 0.492),

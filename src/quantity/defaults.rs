@@ -12,7 +12,7 @@ const KIND_PREFIX: &str = "kind.";
 #[derive(Clone, Debug, Default, PartialEq)]
 pub struct UnitChoice {
     kinds: Vec<Unit>,
-    fields: Vec<(String, Unit)>,
+    fields: Vec<(&'static str, Unit)>,
 }
 
 /// What is wrong with one entry of a choice.
@@ -29,15 +29,16 @@ pub struct ChoiceFault {
 }
 
 impl UnitChoice {
-    /// Reads pairs of a key and a unit; `fields` knows the kind of every field.
+    /// Reads pairs of a key and a unit; `fields` are the names of all fields with their kinds.
     ///
-    /// A key is a field or a kind; `kind.length` is the kind where a field has that name too.
+    /// A key is a field or a kind, and a field beats its kind. A name that is both serves the
+    /// field and, where `kind.length` does not say otherwise, every other field of the kind.
     ///
     /// # Errors
     /// Every fault of every pair.
     pub fn parse_pairs<'a>(
         pairs: impl Iterator<Item = (&'a str, &'a str)>,
-        fields: &dyn Fn(&str) -> Option<Kind>,
+        fields: &[(&'static str, Kind)],
     ) -> Result<UnitChoice, Vec<ChoiceFault>> {
         collect(pairs.map(Ok), fields)
     }
@@ -48,7 +49,7 @@ impl UnitChoice {
     /// Every fault of every pair.
     pub fn parse_text(
         text: &str,
-        fields: &dyn Fn(&str) -> Option<Kind>,
+        fields: &[(&'static str, Kind)],
     ) -> Result<UnitChoice, Vec<ChoiceFault>> {
         if text.trim().is_empty() {
             return Ok(UnitChoice::default());
@@ -62,12 +63,15 @@ impl UnitChoice {
     /// The unit of bare numbers in `field`, which is of `kind`: the field's own, the kind's,
     /// or that of SI.
     pub fn unit(&self, field: &str, kind: Kind) -> Unit {
-        let own = self
-            .fields
-            .iter()
-            .find(|(name, unit)| name == field && unit.kind() == kind);
-        own.map(|&(_, unit)| unit)
+        let of_field = |wanted: &str| {
+            let mut fields = self.fields.iter();
+            fields
+                .find(|(name, unit)| *name == wanted && unit.kind() == kind)
+                .map(|&(_, unit)| unit)
+        };
+        of_field(field)
             .or_else(|| self.kinds.iter().copied().find(|unit| unit.kind() == kind))
+            .or_else(|| of_field(kind.name()))
             .unwrap_or_else(|| kind.si_unit())
     }
 
@@ -75,21 +79,22 @@ impl UnitChoice {
         &mut self,
         key: &str,
         symbol: &str,
-        fields: &dyn Fn(&str) -> Option<Kind>,
+        fields: &[(&'static str, Kind)],
     ) -> Result<(), ChoiceFault> {
         let fault = |code, detail| ChoiceFault {
             key: excerpt(key),
             code,
             detail,
         };
-        let field = fields(key);
+        let field = fields.iter().find(|(name, _)| *name == key);
         let kind = field
+            .map(|&(_, kind)| kind)
             .or_else(|| Kind::from_name(key.strip_prefix(KIND_PREFIX).unwrap_or(key)))
-            .ok_or_else(|| fault("unknown-key", unknown(key)))?;
+            .ok_or_else(|| fault("unknown-key", unknown(key, fields)))?;
         let unit =
             Unit::find(kind, symbol).map_err(|error| fault(error.code(), error.to_string()))?;
         let taken = match field {
-            Some(_) => self.fields.iter().any(|(name, _)| name == key),
+            Some(_) => self.fields.iter().any(|(name, _)| *name == key),
             None => self.kinds.iter().any(|unit| unit.kind() == kind),
         };
         if taken {
@@ -97,7 +102,7 @@ impl UnitChoice {
             return Err(fault("duplicate-key", detail));
         }
         match field {
-            Some(_) => self.fields.push((key.to_owned(), unit)),
+            Some(&(name, _)) => self.fields.push((name, unit)),
             None => self.kinds.push(unit),
         }
         Ok(())
@@ -107,7 +112,7 @@ impl UnitChoice {
 /// Gathers a choice from pairs, or from texts in their place that are none.
 fn collect<'a>(
     pairs: impl Iterator<Item = Result<(&'a str, &'a str), &'a str>>,
-    fields: &dyn Fn(&str) -> Option<Kind>,
+    fields: &[(&'static str, Kind)],
 ) -> Result<UnitChoice, Vec<ChoiceFault>> {
     let mut choice = UnitChoice::default();
     let mut faults = Vec::new();
@@ -135,11 +140,12 @@ fn not_a_pair(text: &str) -> ChoiceFault {
     }
 }
 
-fn unknown(key: &str) -> String {
+fn unknown(key: &str, fields: &[(&'static str, Kind)]) -> String {
     let name = key.strip_prefix(KIND_PREFIX).unwrap_or(key);
     let given = excerpt(key);
-    match nearest(name, Kind::ALL.into_iter().map(Kind::name)) {
-        Some(kind) => format!("\"{given}\" is no field or kind: did you mean {kind}?"),
+    let known = fields.iter().map(|&(name, _)| name);
+    match nearest(name, Kind::ALL.into_iter().map(Kind::name).chain(known)) {
+        Some(near) => format!("\"{given}\" is no field or kind: did you mean {near}?"),
         None => {
             let kinds = Kind::ALL.map(Kind::name).join(", ");
             format!("\"{given}\" is no field or kind: write a field's name or one of {kinds}")
@@ -152,16 +158,14 @@ mod tests {
     use super::super::kind::Kind;
     use super::{ChoiceFault, UnitChoice};
 
-    fn fields(name: &str) -> Option<Kind> {
-        match name {
-            "length" | "diameter" => Some(Kind::Length),
-            "surface_temperature" => Some(Kind::Temperature),
-            _ => None,
-        }
-    }
+    const FIELDS: [(&str, Kind); 3] = [
+        ("length", Kind::Length),
+        ("diameter", Kind::Length),
+        ("surface_temperature", Kind::Temperature),
+    ];
 
     fn choose(text: &str) -> Result<UnitChoice, Vec<ChoiceFault>> {
-        UnitChoice::parse_text(text, &fields)
+        UnitChoice::parse_text(text, &FIELDS)
     }
 
     fn symbol(choice: &UnitChoice, field: &str, kind: Kind) -> &'static str {
@@ -194,10 +198,12 @@ mod tests {
     }
 
     #[test]
-    fn a_name_that_is_both_is_the_field_unless_put_down_as_the_kind() {
+    fn a_name_that_is_both_serves_the_field_and_the_kind() {
         let field = choose("length:mm").unwrap();
         assert_eq!(symbol(&field, "length", Kind::Length), "mm");
-        assert_eq!(symbol(&field, "diameter", Kind::Length), "m");
+        assert_eq!(symbol(&field, "diameter", Kind::Length), "mm");
+        let own = choose("length:mm,diameter:in").unwrap();
+        assert_eq!(symbol(&own, "diameter", Kind::Length), "in");
         let both = choose("kind.length:in,length:ft").unwrap();
         assert_eq!(symbol(&both, "length", Kind::Length), "ft");
         assert_eq!(symbol(&both, "diameter", Kind::Length), "in");
@@ -206,7 +212,7 @@ mod tests {
     #[test]
     fn pairs_read_as_text_does() {
         let pairs = [("temperature", "degC"), ("diameter", "mm")];
-        let choice = UnitChoice::parse_pairs(pairs.into_iter(), &fields);
+        let choice = UnitChoice::parse_pairs(pairs.into_iter(), &FIELDS);
         assert_eq!(choice, choose("temperature:degC,diameter:mm"));
         assert!(choice.is_ok());
     }
@@ -251,7 +257,7 @@ mod tests {
             details[2]
         );
         assert!(
-            details[7].contains("temperature_difference"),
+            details[7].ends_with("did you mean diameter?"),
             "{}",
             details[7]
         );

@@ -53,9 +53,9 @@ def figure_faults(name, value):
         yield f"{name} is {value!r} instead of {expected}"
 
 
-def good_post(client, film):
+def good_post(client):
     request = module("models").FilmRequest.from_dict(PIPE)
-    response = film.create_film.sync_detailed(client=client, body=request)
+    response = module("api.film.create_film").sync_detailed(client=client, body=request)
     if response.status_code != 200:
         yield f"{response.status_code}: {response.content[:300]}"
         return
@@ -63,9 +63,9 @@ def good_post(client, film):
         yield from figure_faults(name, getattr(response.parsed, name))
 
 
-def refused_post(client, film):
+def refused_post(client):
     request = module("models").FilmRequest.from_dict({**PIPE, "diameter": "88.9 degC"})
-    response = film.create_film.sync_detailed(client=client, body=request)
+    response = module("api.film.create_film").sync_detailed(client=client, body=request)
     problem = response.parsed
     if response.status_code != 422 or problem.status != 422:
         yield f"{response.status_code}: {response.content[:300]}"
@@ -73,21 +73,29 @@ def refused_post(client, film):
         yield f"errors are {problem.errors}"
 
 
-def one_figure(client, film):
-    models = module("models")
-    response = film.read_film.sync_detailed(
-        client=client,
-        **{**PIPE, "geometry": models.Geometry(PIPE["geometry"])},
-        want="heat_transfer_coefficient",
-    )
+def whole_get(client):
+    geometry = module("models").ReadFilmGeometry(PIPE["geometry"])
+    response = module("api.film.read_film").sync_detailed(client=client, **{**PIPE, "geometry": geometry})
     if response.status_code != 200:
         yield f"{response.status_code}: {response.content[:300]}"
         return
-    yield from figure_faults("heat_transfer_coefficient", float(response.content))
+    for name in EXPECTED:
+        yield from figure_faults(name, getattr(response.parsed, name))
 
 
-def catalogues(client, _film):
-    fluids = module("api.fluids").list_fluids.sync(client=client)
+def one_figure(client):
+    # The generator reads the first media type of an answer only, so the bare figure is taken from
+    # the client's own connection.
+    name = "heat_transfer_coefficient"
+    response = client.get_httpx_client().get("/v1/film", params={**PIPE, "want": name})
+    if response.status_code != 200 or not response.headers["content-type"].startswith("text/plain"):
+        yield f"{response.status_code}: {response.content[:300]}"
+        return
+    yield from figure_faults(name, float(response.text))
+
+
+def catalogues(client):
+    fluids = module("api.catalogue.list_fluids").sync(client=client)
     if "air" not in [fluid.id for fluid in fluids.fluids]:
         yield f"no air among {fluids}"
 
@@ -97,10 +105,8 @@ def main():
         sys.exit(f"usage: {sys.argv[0]} URL")
     generate(sys.argv[1])
     client = module("client").Client(base_url=sys.argv[1])
-    for name in ("api.film.create_film", "api.film.read_film", "api.fluids.list_fluids"):
-        module(name)
-    calls = [good_post, refused_post, one_figure, catalogues]
-    faults = [f"{call.__name__}: {fault}" for call in calls for fault in call(client, module("api.film"))]
+    calls = [good_post, refused_post, whole_get, one_figure, catalogues]
+    faults = [f"{call.__name__}: {fault}" for call in calls for fault in call(client)]
     for fault in faults:
         print(f"generated client: {fault}")
     print(f"generated client: {len(calls)} calls, {len(faults)} faults")

@@ -86,7 +86,7 @@ def number_outside_limits(random):
 
 @refused(422)
 def vanishing_number(random):
-    name = random.choice(["diameter", "surface_temperature", "ambient_temperature", "pressure", "gravity"])
+    name = random.choice(["diameter", "surface_temperature", "pressure"])
     return film(**{name: random.choice([0, -0.0, 5e-324, 2.2e-308, 1e-200])})
 
 
@@ -174,7 +174,7 @@ def no_json(random):
         good.replace('"', "'").encode(), good[:-1].encode() + b",}", good.encode() + b"x", good.encode() * 2,
         b"/* */" + good.encode(), b"\xef\xbb\xbf" + good.encode(), good.encode("utf-16"), good.encode("utf-32"),
         b"geometry=sphere", b"<case/>", b"", b" ", b"\x00", b"{]", b'{"a" 1}', b"{1: 2}", bytes(1000),
-        random.randbytes(300) + b"\xff",
+        b"{" + random.randbytes(300) + b"\xff",
     ]))  # fmt: skip
 
 
@@ -186,7 +186,7 @@ def truncated_json(random):
 
 @refused(422)
 def no_object(random):
-    tokens = [b"5", b'"x"', b"[]", b"null", b"true", b"[{}]", json.dumps([PIPE]).encode(), b"1e400"]
+    tokens = [b"5", b'"x"', b"[]", b"null", b"true", b"[{}]", json.dumps([PIPE]).encode(), b"-0.0"]
     return post(FILM, random.choice(tokens))
 
 

@@ -13,7 +13,7 @@ from urllib.parse import urlencode
 from hostile_requests import PIPE
 from problem import problem_faults
 from service import Service
-from wire import Connection, address, exchange, post, request
+from wire import Answer, Connection, address, exchange, post, request
 
 HEADER_SECONDS = 1.0
 BODY_SECONDS = 1.5
@@ -37,13 +37,20 @@ def timed(action):
 
 
 def status_fault(name, answer, status):
-    if answer is None or isinstance(answer, TimeoutError) or answer.status != status:
+    if not isinstance(answer, Answer) or answer.status != status:
         yield f"{name}: {answer!r} instead of {status}"
 
 
 def refusal_faults(name, answer, status):
-    wrong = list(status_fault(name, answer, status))
-    return wrong or [f"{name}: {fault}" for fault in problem_faults(answer)]
+    yield from status_fault(name, answer, status)
+    if isinstance(answer, Answer) and answer.status == status:
+        yield from (f"{name}: {fault}" for fault in problem_faults(answer))
+
+
+def close_fault(name, answer):
+    """A caller must be told that a connection with an unread body is closed (RFC 9112, 9.6)."""
+    if isinstance(answer, Answer) and answer.headers.get("connection") != "close":
+        yield f"{name}: without connection: close"
 
 
 def deadline_fault(name, seconds, deadline):
@@ -142,6 +149,7 @@ def body_sizes(service):
     yield from status_fault("a body as large as allowed", exchange(service.url, post("/v1/film", full)), 200)
     answer = exchange(service.url, post("/v1/film", full + b" "))
     yield from refusal_faults("a body one byte too large", answer, 413)
+    yield from close_fault("a body one byte too large", answer)
     announced = ["content-type: application/json", "content-length: 1000000000000", "expect: 100-continue"]
     answer, seconds = timed(lambda: exchange(service.url, request("POST", "/v1/film", None, announced)))
     yield from refusal_faults("a too large body announced", answer, 413)
@@ -155,6 +163,7 @@ def slow_body(service):
     answer, seconds = timed(lambda: connection.answer("POST"))
     yield from deadline_fault("slow body", seconds, BODY_SECONDS)
     yield from refusal_faults("slow body", answer, 408)
+    yield from close_fault("slow body", answer)
 
 
 def drained_end(service):

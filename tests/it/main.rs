@@ -1,1 +1,9 @@
-//! Integration tests.
+//! The library and the routes, checked from outside.
+
+mod continuity;
+mod layering;
+mod openapi;
+mod properties;
+mod published;
+mod routes;
+mod support;

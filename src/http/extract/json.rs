@@ -11,7 +11,7 @@ use crate::case::{Fault, Given, duplicate_field};
 use crate::http::problem::{Problem, ProblemKind};
 use crate::quantity::{Kind, UnitChoice};
 
-use super::{FilmInput, UNIT_MEMBERS, field_kind, keep_choice, result_kind};
+use super::{ANSWER_KINDS, FIELD_KINDS, FilmInput, UNIT_MEMBERS, keep_choice};
 
 /// Reads one case; what is wrong with its members stays in the input's faults.
 ///
@@ -40,11 +40,11 @@ pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
         }
     }
     let [units, answer_units] = chosen;
-    input.units = read_choice(units, UNIT_MEMBERS[0], field_kind, &mut input.faults);
+    input.units = read_choice(units, UNIT_MEMBERS[0], &FIELD_KINDS, &mut input.faults);
     input.answer_units = read_choice(
         answer_units,
         UNIT_MEMBERS[1],
-        result_kind,
+        &ANSWER_KINDS,
         &mut input.faults,
     );
     Ok(input)
@@ -102,7 +102,7 @@ fn read_value(raw: &RawValue) -> Option<Given<'_>> {
 fn read_choice(
     raw: Option<&RawValue>,
     member: &'static str,
-    kind_of: fn(&str) -> Option<Kind>,
+    kinds: &[(&'static str, Kind)],
     faults: &mut Vec<Fault>,
 ) -> UnitChoice {
     let Some(raw) = raw.filter(|raw| raw.get() != "null") else {
@@ -120,7 +120,7 @@ fn read_choice(
             let pairs = pairs
                 .iter()
                 .map(|(key, unit)| (key.as_str(), unit.as_str()));
-            keep_choice(UnitChoice::parse_pairs(pairs, &kind_of), member, faults)
+            keep_choice(UnitChoice::parse_pairs(pairs, kinds), member, faults)
         }
         None => {
             faults.push(Fault::under(

@@ -10,7 +10,9 @@ pub use body::JsonBody;
 pub use json::read_film_body;
 pub use query::{Query, QueryOptions};
 
-use crate::case::{Entries, Fault, answer_kind};
+use std::sync::LazyLock;
+
+use crate::case::{Entries, Fault, answer_kinds};
 use crate::geometry::Field;
 use crate::quantity::{ChoiceFault, Kind, UnitChoice, parse};
 
@@ -30,15 +32,16 @@ pub struct FilmInput<'a> {
 /// Members of a request beside the fields of its case.
 const UNIT_MEMBERS: [&str; 2] = ["units", "answer_units"];
 
-/// The kind of quantity that a field of a case holds.
-fn field_kind(name: &str) -> Option<Kind> {
-    Field::from_name(name).and_then(Field::kind)
-}
+/// The quantity fields of a case with their kinds.
+static FIELD_KINDS: LazyLock<Vec<(&str, Kind)>> = LazyLock::new(|| {
+    let fields = Field::ALL.iter();
+    fields
+        .filter_map(|field| Some((field.name(), field.kind()?)))
+        .collect()
+});
 
-/// The kind of quantity that a name in an answer stands for.
-fn result_kind(name: &str) -> Option<Kind> {
-    answer_kind(name)
-}
+/// The figures of an answer with their kinds.
+static ANSWER_KINDS: LazyLock<Vec<(&str, Kind)>> = LazyLock::new(|| answer_kinds().collect());
 
 /// Keeps a choice of units, or adds its faults under the member that holds it.
 fn keep_choice(

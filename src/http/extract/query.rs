@@ -8,7 +8,7 @@ use axum::http::request::Parts;
 use crate::case::{Column, Fault, Given, duplicate_field, shown, unknown_field};
 use crate::quantity::{UnitChoice, nearest};
 
-use super::{FilmInput, field_kind, keep_choice, result_kind};
+use super::{ANSWER_KINDS, FIELD_KINDS, FilmInput, keep_choice};
 
 /// A query's parameters as they stand in the URL.
 pub struct Query(String);
@@ -60,11 +60,11 @@ impl Query {
             }
             match name.as_ref() {
                 "units" => {
-                    let choice = UnitChoice::parse_text(&value, &field_kind);
+                    let choice = UnitChoice::parse_text(&value, &FIELD_KINDS);
                     input.units = keep_choice(choice, "units", &mut input.faults);
                 }
                 "answer_units" => {
-                    let choice = UnitChoice::parse_text(&value, &result_kind);
+                    let choice = UnitChoice::parse_text(&value, &ANSWER_KINDS);
                     input.answer_units = keep_choice(choice, "answer_units", &mut input.faults);
                 }
                 "want" => options.want = read_want(&value, &mut input.faults),

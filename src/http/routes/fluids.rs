@@ -21,6 +21,7 @@ use crate::quantity::{Kind, UnitChoice, nearest};
 /// All fluids.
 #[derive(Serialize, ToSchema)]
 pub struct FluidList<'a> {
+    /// Every one of them, in a fixed order.
     fluids: Vec<FluidView<'a>>,
 }
 

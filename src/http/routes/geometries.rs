@@ -13,6 +13,7 @@ use crate::http::reply::{json, tagged};
 /// All bodies.
 #[derive(Serialize, ToSchema)]
 pub struct Geometries {
+    /// Every one of them, in a fixed order.
     geometries: Vec<GeometryView>,
 }
 

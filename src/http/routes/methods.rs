@@ -13,6 +13,7 @@ use crate::methods::{Method, MethodId, Range, Scatter};
 /// All methods.
 #[derive(Serialize, ToSchema)]
 pub struct Methods {
+    /// Every one of them, in a fixed order.
     methods: Vec<MethodView>,
 }
 
