@@ -14,6 +14,7 @@
 //! | [`geometry`] | the bodies and the fields that each asks for |
 //! | [`quantity`] | units: the only place with a conversion factor |
 //! | [`config`] | flags and environment |
+//! | [`log`] | the log on standard error |
 //! | [`digest`] | digests of tables, registry, cases and answers |
 //!
 //! Modules import only from modules below them in this table; `methods` and `fluids` do not know each other.
@@ -26,5 +27,6 @@ pub mod film;
 pub mod fluids;
 pub mod geometry;
 pub mod http;
+pub mod log;
 pub mod methods;
 pub mod quantity;

@@ -3,17 +3,14 @@
 use std::process::ExitCode;
 
 use clap::Parser;
-use plumeline::{cli, config::Config};
+use plumeline::{cli, config::Config, log};
 
 fn main() -> ExitCode {
     let config = Config::parse();
-    tracing_subscriber::fmt()
-        .json()
-        .flatten_event(true)
-        .with_target(false)
-        .with_writer(std::io::stderr)
-        .init();
-    match cli::run(config) {
+    let log = log::start();
+    let outcome = cli::run(config);
+    drop(log);
+    match outcome {
         Ok(()) => ExitCode::SUCCESS,
         Err(reason) => {
             eprintln!("plumeline: {reason}");

@@ -1,7 +1,5 @@
 //! A well-formed case.
 
-use std::fmt::Write;
-
 use crate::digest::sha256;
 use crate::fluids::{FluidId, Fluids, Phase};
 use crate::geometry::{Extrapolate, Facing, Field, Geometry};
@@ -136,34 +134,13 @@ impl Case {
 
     /// Digest of everything an answer depends on, however the case was written.
     ///
-    /// SHA-256 of one `name=value` line for each quantity in SI, numbers in the shortest form that reads back.
+    /// SHA-256 of the words, each ended by a line feed, and of the quantities in SI as 64-bit big-endian floats, each behind a byte 1; a byte 0 stands for one that is not given.
     pub fn digest(&self, fluids: &Fluids) -> String {
         let size = self.size;
-        let mut text = String::with_capacity(512);
-        let mut line = |name: &str, value: Option<f64>| {
-            if let Some(value) = value {
-                // Writing to a String does not fail.
-                let _ = writeln!(text, "{name}={value:e}");
-            }
+        let (temperature, flux) = match self.surface {
+            Surface::Temperature(value) => (Some(value), None),
+            Surface::HeatFlux(value) => (None, Some(value)),
         };
-        line("characteristic_length", Some(size.characteristic_length));
-        line("area", size.area);
-        line("area_per_length", size.area_per_length);
-        line("tilt", Some(size.tilt));
-        line("slenderness", Some(size.slenderness));
-        line("length_ratio", Some(size.length_ratio));
-        match self.surface {
-            Surface::Temperature(value) => line("surface_temperature", Some(value)),
-            Surface::HeatFlux(value) => line("heat_flux", Some(value)),
-        }
-        line("ambient_temperature", Some(self.ambient_temperature));
-        line("pressure", Some(self.pressure));
-        line("emissivity", self.emissivity);
-        line(
-            "surroundings_temperature",
-            Some(self.surroundings_temperature),
-        );
-        line("gravity", Some(self.gravity));
         let words = [
             self.geometry.as_str(),
             self.facing.map_or("", Facing::as_str),
@@ -171,8 +148,31 @@ impl Case {
             self.method.map_or("auto", MethodId::as_str),
             self.extrapolate.as_str(),
         ];
-        text.push_str(&words.join("\n"));
-        sha256(text.as_bytes())
+        let numbers = [
+            Some(size.characteristic_length),
+            size.area,
+            size.area_per_length,
+            Some(size.tilt),
+            Some(size.slenderness),
+            Some(size.length_ratio),
+            temperature,
+            flux,
+            Some(self.ambient_temperature),
+            Some(self.pressure),
+            self.emissivity,
+            Some(self.surroundings_temperature),
+            Some(self.gravity),
+        ];
+        let mut bytes = Vec::with_capacity(256);
+        for word in words {
+            bytes.extend_from_slice(word.as_bytes());
+            bytes.push(b'\n');
+        }
+        for number in numbers {
+            bytes.push(u8::from(number.is_some()));
+            bytes.extend(number.map(f64::to_be_bytes).into_iter().flatten());
+        }
+        sha256(&bytes)
     }
 }
 

@@ -199,7 +199,12 @@ fn breaches(code: NoteCode, case: &Case, answer: &Answer) -> String {
 /// A temperature as people in a plant read it.
 fn celsius(kelvin: f64) -> String {
     match Unit::find(Kind::Temperature, "degC") {
-        Ok(unit) => format!("{:.1} {}", unit.from_si(kelvin), unit.symbol()),
-        Err(_) => format!("{kelvin:.1} K"),
+        Ok(unit) => format!("{} {}", tenths(unit.from_si(kelvin)), unit.symbol()),
+        Err(_) => format!("{} K", tenths(kelvin)),
     }
+}
+
+/// A number rounded to tenths; the shortest text of it is then short, and far cheaper than an exact one.
+fn tenths(value: f64) -> f64 {
+    (value * 10.0).round() / 10.0
 }

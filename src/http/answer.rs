@@ -1,6 +1,9 @@
 //! An answer in JSON, written from the list of columns.
 
+use std::sync::LazyLock;
+
 use serde::ser::{Serialize, SerializeMap, SerializeSeq, Serializer};
+use serde_json::value::{RawValue, to_raw_value};
 
 use crate::case::{Answer, Case, Cell, Column, Notes, PROPERTIES};
 use crate::film::{alternatives, basis, note};
@@ -50,9 +53,13 @@ impl Serialize for FilmReply<'_> {
             },
         )?;
         map.serialize_entry("alternatives", &AlternativesReply(self))?;
-        map.serialize_entry("source", &SourceReply(self.answer.method))?;
+        map.serialize_entry("source", source(self.answer.method))?;
         map.serialize_entry("basis", &basis(self.case, self.answer, self.fluids))?;
-        map.serialize_entry("units", &UnitsReply(self.units))?;
+        if *self.units == UnitChoice::default() {
+            map.serialize_entry("units", &**SI_UNITS)?;
+        } else {
+            map.serialize_entry("units", &UnitsReply(self.units))?;
+        }
         map.serialize_entry(
             "provenance",
             &ProvenanceReply {
@@ -147,21 +154,41 @@ impl Serialize for AlternativesReply<'_> {
     }
 }
 
-/// Where a method was published, and its formula.
-pub struct SourceReply(pub MethodId);
-
-impl Serialize for SourceReply {
-    fn serialize<S: Serializer>(&self, serializer: S) -> Result<S::Ok, S::Error> {
-        let method = self.0.method();
-        let mut map = serializer.serialize_map(Some(5))?;
-        map.serialize_entry("authors", method.source.authors)?;
-        map.serialize_entry("year", &method.source.year)?;
-        map.serialize_entry("work", method.source.work)?;
-        map.serialize_entry("locator", method.source.locator)?;
-        map.serialize_entry("formula", method.formula)?;
-        map.end()
-    }
+/// Where a method was published, and its formula; written once for each method.
+fn source(id: MethodId) -> &'static RawValue {
+    static WRITTEN: LazyLock<Vec<Box<RawValue>>> = LazyLock::new(|| {
+        let write = |id: &MethodId| {
+            let method = id.method();
+            written(&SourceReply {
+                authors: method.source.authors,
+                year: method.source.year,
+                work: method.source.work,
+                locator: method.source.locator,
+                formula: method.formula,
+            })
+        };
+        MethodId::ALL.iter().map(write).collect()
+    });
+    &WRITTEN[id as usize]
 }
+
+#[derive(serde::Serialize)]
+struct SourceReply {
+    authors: &'static str,
+    year: u16,
+    work: &'static str,
+    locator: &'static str,
+    formula: &'static str,
+}
+
+/// JSON that is the same in every answer.
+fn written(value: &impl Serialize) -> Box<RawValue> {
+    to_raw_value(value).expect("texts and whole numbers are always written")
+}
+
+/// The units of an answer in SI, written once.
+static SI_UNITS: LazyLock<Box<RawValue>> =
+    LazyLock::new(|| written(&UnitsReply(&UnitChoice::default())));
 
 /// The unit of every figure of an answer that has one.
 struct UnitsReply<'a>(&'a UnitChoice);

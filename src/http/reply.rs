@@ -8,6 +8,9 @@ use crate::digest::sha256;
 
 use super::problem::{Problem, ProblemKind};
 
+/// Room for a whole film answer, so that writing it does not move it.
+const EXPECTED_BYTES: usize = 6 << 10;
+
 /// The body of a good answer.
 pub struct Body {
     content_type: &'static str,
@@ -19,9 +22,11 @@ pub struct Body {
 /// # Errors
 /// The value cannot be written, which is the service's fault.
 pub fn json(value: &impl Serialize) -> Result<Body, Problem> {
+    let mut bytes = Vec::with_capacity(EXPECTED_BYTES);
+    serde_json::to_writer(&mut bytes, value).map_err(internal)?;
     Ok(Body {
         content_type: "application/json",
-        bytes: serde_json::to_vec(value).map_err(internal)?,
+        bytes,
     })
 }
 

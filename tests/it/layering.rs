@@ -27,6 +27,7 @@ const LAYERS: &[(&str, &[&str])] = &[
     ("quantity", &[]),
     ("config", &[]),
     ("digest", &[]),
+    ("log", &[]),
 ];
 
 #[test]
