@@ -59,7 +59,8 @@ impl Failure {
             Failure::Side { method, side } => {
                 let heating = case.heating();
                 let fitting: Vec<_> = MethodId::serving(case.geometry, heating, side)
-                    .map(MethodId::as_str)
+                    .iter()
+                    .map(|id| id.as_str())
                     .collect();
                 Fault::at(
                     Field::Method,

@@ -72,7 +72,7 @@ impl<'a> Layer<'a> {
     }
 
     /// The methods that serve it, the body's usual one first.
-    pub fn methods(&self) -> impl Iterator<Item = MethodId> + Clone {
+    pub fn methods(&self) -> &'static [MethodId] {
         MethodId::serving(self.case.geometry, self.case.heating(), self.side)
     }
 
@@ -117,7 +117,7 @@ impl<'a> Layer<'a> {
     /// The method asked for, or the automatic choice: the body's usual method within and, where that is allowed, near its range; else the first other within; else the first other near.
     pub fn choose(&self, extrapolate: Extrapolate) -> Result<Entered, Failure> {
         if let Some(id) = self.case.method {
-            if !self.methods().any(|other| other == id) {
+            if !self.methods().contains(&id) {
                 return Err(Failure::Side {
                     method: id,
                     side: self.side,
@@ -132,7 +132,11 @@ impl<'a> Layer<'a> {
         {
             return Ok(usual);
         }
-        let others = || self.methods().skip(1).filter_map(|id| self.enter(id).ok());
+        let others = || {
+            self.methods()[1..]
+                .iter()
+                .filter_map(|&id| self.enter(id).ok())
+        };
         let within = others().find(Entered::is_within);
         let near = || others().find(|other| other.verdict.status == RangeStatus::Near);
         let best = within.or_else(near).unwrap_or(usual);
@@ -149,7 +153,7 @@ impl<'a> Layer<'a> {
     /// The body's usual method for this layer.
     pub fn usual(&self) -> Result<Entered, Failure> {
         // The registry's tests prove that every body, heating and side has a method.
-        let id = self.methods().next().unwrap_or(MethodId::ALL[0]);
+        let id = self.methods()[0];
         Ok(self.enter(id)?)
     }
 
@@ -166,8 +170,9 @@ impl<'a> Layer<'a> {
     /// Every other method that serves the layer and whose properties are known.
     pub fn others(&self, chosen: MethodId) -> impl Iterator<Item = Entered> {
         self.methods()
-            .filter(move |&id| id != chosen)
-            .filter_map(|id| self.enter(id).ok())
+            .iter()
+            .filter(move |&&id| id != chosen)
+            .filter_map(|&id| self.enter(id).ok())
     }
 
     fn allow(&self, entered: Entered, extrapolate: Extrapolate) -> Result<Entered, Failure> {

@@ -156,7 +156,7 @@ fn surface_temperature_max(case: &Case, difference: f64) -> Option<f64> {
 
 /// How far the automatic choice is from the body's usual method, where it had to leave it.
 fn method_step(case: &Case, layer: &Layer, entered: &Entered, coefficient: f64) -> f64 {
-    if case.method.is_some() || layer.methods().next() == Some(entered.id) {
+    if case.method.is_some() || layer.methods()[0] == entered.id {
         return 0.0;
     }
     layer

@@ -98,21 +98,36 @@ impl MethodId {
             .iter()
             .any(|&heating| {
                 let mut sides = Side::ALL.iter();
-                sides.any(|&side| MethodId::serving(geometry, heating, side).next() == Some(self))
+                sides.any(|&side| MethodId::serving(geometry, heating, side).first() == Some(&self))
             })
     }
 
     /// The methods of a body for a heating and a side, the automatic choice first.
-    pub fn serving(
-        geometry: Geometry,
-        heating: Heating,
-        side: Side,
-    ) -> impl Iterator<Item = MethodId> + Clone {
-        MethodId::ALL.iter().copied().filter(move |id| {
-            let method = id.method();
-            method.geometry == geometry && method.serves(heating, side)
-        })
+    pub fn serving(geometry: Geometry, heating: Heating, side: Side) -> &'static [MethodId] {
+        static TABLE: LazyLock<Vec<Vec<MethodId>>> = LazyLock::new(|| {
+            let heatings = || {
+                Heating::ALL
+                    .iter()
+                    .flat_map(|&h| Side::ALL.iter().map(move |&s| (h, s)))
+            };
+            let cases = Geometry::ALL
+                .iter()
+                .flat_map(|&g| heatings().map(move |(h, s)| (g, h, s)));
+            cases
+                .map(|(geometry, heating, side)| listed(geometry, heating, side))
+                .collect()
+        });
+        let place = geometry as usize * Heating::ALL.len() + heating as usize;
+        &TABLE[place * Side::ALL.len() + side as usize]
     }
+}
+
+fn listed(geometry: Geometry, heating: Heating, side: Side) -> Vec<MethodId> {
+    let serves = |id: &MethodId| {
+        let method = id.method();
+        method.geometry == geometry && method.serves(heating, side)
+    };
+    MethodId::ALL.iter().copied().filter(serves).collect()
 }
 
 /// Digest of everything the registry says of its methods: ids, formulas, sources, ranges and examples.

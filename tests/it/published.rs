@@ -12,10 +12,11 @@
 //!   the second's;
 //! - `expect`: a list of figures. Each names a `figure` (a column or property of an answer, for
 //!   a formula `nusselt`), the published `value`, a tolerance (`absolute` or `relative`) and
-//!   the `reason` for it. `per` divides by another figure of the same answer. `deviation` is how
-//!   far, as a fraction of the published value, the figure is known to lie from it; the reason
-//!   names the cause, and the tolerance is then about the figure found. A `value` that is a
-//!   text is a word of the answer and takes nothing else.
+//!   the `reason` for it. `unit` is the value's where it is not SI, `per` divides by another
+//!   figure of the same answer. `deviation` is how far, as a fraction of the published value,
+//!   the figure is known to lie from it; the reason names the cause, and the tolerance is then
+//!   about the figure that the deviation leads to. A `value` that is a text is a word of the
+//!   answer and takes nothing else.
 //!
 //! The method that a check speaks of is the formula's, else the request's, else the expected
 //! `method`; every check has one.
@@ -24,15 +25,19 @@ use std::collections::HashSet;
 use std::fs;
 use std::path::PathBuf;
 
-use plumeline::case::{Cell, Column, PROPERTIES};
+use plumeline::case::{Answer, Cell, Column, PROPERTIES, answer_kinds};
 use plumeline::methods::{Groups, MethodId};
+use plumeline::quantity::Unit;
 use serde::Deserialize;
 use serde_json::Value;
 
 use super::support::{Request, outcome, read, request};
 
 /// As many checks as stood here when this was written; a lost file shows.
-const FEWEST_CHECKS: usize = 1;
+const FEWEST_CHECKS: usize = 147;
+
+/// How a figure can have come here.
+const READINGS: [&str; 4] = ["found", "memory", "common practice", "computed"];
 
 #[derive(Deserialize)]
 #[serde(deny_unknown_fields)]
@@ -46,21 +51,11 @@ struct File {
 struct Check {
     id: String,
     source: String,
-    read: Reading,
+    read: String,
     request: Option<Value>,
     formula: Option<Value>,
     against: Option<Value>,
     expect: Vec<Expectation>,
-}
-
-#[derive(Deserialize, PartialEq, Eq)]
-#[serde(rename_all = "lowercase")]
-enum Reading {
-    Found,
-    Memory,
-    #[serde(rename = "common practice")]
-    CommonPractice,
-    Computed,
 }
 
 #[derive(Deserialize)]
@@ -68,6 +63,7 @@ enum Reading {
 struct Expectation {
     figure: String,
     per: Option<String>,
+    unit: Option<String>,
     value: Value,
     deviation: Option<f64>,
     absolute: Option<f64>,
@@ -91,7 +87,7 @@ struct Formula {
 
 /// What a figure is read from.
 enum Subject {
-    Answer(Box<plumeline::case::Answer>),
+    Answer(Box<Answer>),
     Nusselt(f64, MethodId),
 }
 
@@ -150,6 +146,9 @@ impl Check {
         let mut failures = Vec::new();
         if self.source.is_empty() || self.expect.is_empty() {
             failures.push("no source or nothing expected".to_owned());
+        }
+        if !READINGS.contains(&self.read.as_str()) {
+            failures.push(format!("read {}", self.read));
         }
         let subjects = self.subject().and_then(|subject| {
             let against = self.against.as_ref();
@@ -269,9 +268,15 @@ impl Subject {
     }
 }
 
-fn cell(answer: &plumeline::case::Answer, figure: &str) -> Result<Cell, String> {
+fn cell(answer: &Answer, figure: &str) -> Result<Cell, String> {
     let column = Column::from_name(figure).ok_or("no such figure")?;
     Ok((column.entry().cell)(answer))
+}
+
+fn unit(figure: &str, symbol: &str) -> Result<Unit, String> {
+    let kind = answer_kinds().find(|(name, _)| *name == figure);
+    let (_, kind) = kind.ok_or("no such figure")?;
+    Unit::find(kind, symbol).map_err(|error| error.to_string())
 }
 
 impl Expectation {
@@ -281,7 +286,8 @@ impl Expectation {
         let given: Vec<f64> = tolerances.into_iter().flatten().collect();
         let reason = self.reason.as_deref().unwrap_or_default();
         let complete = if self.value.is_string() {
-            given.is_empty() && self.reason.is_none() && self.per.is_none()
+            let others = [&self.per, &self.unit, &self.reason];
+            given.is_empty() && self.deviation.is_none() && others.iter().all(|o| o.is_none())
         } else {
             given.len() == 1 && given[0] > 0.0 && !reason.is_empty()
         };
@@ -303,6 +309,9 @@ impl Expectation {
         }
         let value = self.value.as_f64().ok_or("the value is no number")?;
         let mut found = self.figure_of(subject)?;
+        if let Some(symbol) = &self.unit {
+            found = unit(&self.figure, symbol)?.from_si(found);
+        }
         if let Some(against) = against {
             found /= self.figure_of(against)?;
         }
