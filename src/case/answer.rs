@@ -211,10 +211,10 @@ columns! {
         "how the case lies to the method's range", "\"within\"", |a| Cell::Word(a.range_status.as_str());
     Scatter = "scatter", Quantity(Kind::Number),
         "spread of measurements about the method, a fraction", "0.15", |a| number(a.scatter);
-    Low = "low", Optional(Kind::Coefficient),
-        "smallest coefficient of all methods within range, scatter not counted; null when none is", "7.28", |a| Cell::Number(a.low);
-    High = "high", Optional(Kind::Coefficient),
-        "largest coefficient of all methods within range, scatter not counted; null when none is", "8.21", |a| Cell::Number(a.high);
+    Low = "low", Quantity(Kind::Coefficient),
+        "smallest coefficient of the method used and all others within range, scatter not counted", "7.28", |a| Cell::Number(a.low);
+    High = "high", Quantity(Kind::Coefficient),
+        "largest coefficient of the method used and all others within range, scatter not counted", "8.21", |a| Cell::Number(a.high);
     Notes = "notes", ColumnType::Notes,
         "what to know about this answer", "[]", |a| Cell::Notes(a.notes);
 }

@@ -3,11 +3,12 @@
 use std::borrow::Cow;
 
 use serde_json::{Value, json};
+use utoipa::openapi::path::{Parameter, ParameterBuilder, ParameterIn};
 use utoipa::openapi::schema::{
     AdditionalProperties, AnyOfBuilder, ArrayBuilder, Object, ObjectBuilder, Schema, SchemaType,
     Type,
 };
-use utoipa::openapi::{Ref, RefOr};
+use utoipa::openapi::{Ref, RefOr, Required};
 use utoipa::{PartialSchema, ToSchema};
 
 use crate::case::{CODES, Column, ColumnType, NoteCode, PROPERTIES, Severity};
@@ -472,12 +473,27 @@ pub fn fault_code() -> RefOr<Schema> {
         .into()
 }
 
-/// The schema of a temperature in a query.
-pub fn temperature() -> RefOr<Schema> {
-    reference(&kind_schema_name(Kind::Temperature))
+/// A parameter of a query.
+pub fn parameter(
+    name: &str,
+    text: &str,
+    required: bool,
+    schema: impl Into<RefOr<Schema>>,
+) -> Parameter {
+    ParameterBuilder::new()
+        .name(name)
+        .parameter_in(ParameterIn::Query)
+        .description(Some(text))
+        .required(if required {
+            Required::True
+        } else {
+            Required::False
+        })
+        .schema(Some(schema))
+        .build()
 }
 
-/// The schema of a pressure in a query.
-pub fn pressure() -> RefOr<Schema> {
-    reference(&kind_schema_name(Kind::Pressure))
+/// A parameter of a query that holds a quantity.
+pub fn quantity_parameter(name: &str, text: &str, required: bool, kind: Kind) -> Parameter {
+    parameter(name, text, required, reference(&kind_schema_name(kind)))
 }

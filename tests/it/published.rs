@@ -184,14 +184,15 @@ impl Check {
 
     /// The method that the check speaks of, without evaluating it.
     fn method(&self) -> Option<&str> {
-        let of = |subject: &Option<Value>| Some(subject.as_ref()?.get("method")?.as_str()?);
-        let expected = self
-            .expect
-            .iter()
-            .find(|expected| expected.figure == "method");
-        of(&self.formula)
-            .or_else(|| of(&self.request))
-            .or_else(|| expected?.value.as_str())
+        let subject = self.formula.as_ref().or(self.request.as_ref())?;
+        let mut expected = self.expect.iter();
+        match subject.get("method") {
+            Some(method) => method.as_str(),
+            None => expected
+                .find(|expected| expected.figure == "method")?
+                .value
+                .as_str(),
+        }
     }
 
     fn subject(&self) -> Result<Subject, String> {

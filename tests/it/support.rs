@@ -87,3 +87,118 @@ fn chosen_units(value: &Value) -> UnitChoice {
         .map(|(key, unit)| (key.as_str(), unit.as_str().expect("a unit is a text")));
     UnitChoice::parse_pairs(pairs, &kinds).unwrap_or_else(|faults| panic!("{faults:#?}"))
 }
+
+/// A case under construction, numbers in SI.
+#[derive(Clone, Debug)]
+pub struct Draft {
+    words: Vec<(&'static str, &'static str)>,
+    numbers: Vec<(&'static str, f64)>,
+}
+
+impl Draft {
+    /// A body in a fluid.
+    pub fn new(geometry: &'static str, fluid: &'static str) -> Self {
+        Draft {
+            words: vec![("geometry", geometry), ("fluid", fluid)],
+            numbers: Vec::new(),
+        }
+    }
+
+    /// The same with a field that holds a word; the last one given counts.
+    pub fn word(mut self, name: &'static str, word: &'static str) -> Self {
+        self.words.retain(|(known, _)| *known != name);
+        self.words.push((name, word));
+        self
+    }
+
+    /// The same with a field that holds a number; the last one given counts.
+    pub fn number(mut self, name: &'static str, number: f64) -> Self {
+        self.numbers.retain(|(known, _)| *known != name);
+        self.numbers.push((name, number));
+        self
+    }
+
+    /// The case.
+    pub fn read(&self) -> Result<Case, Vec<Fault>> {
+        let mut entries = Entries::default();
+        let words = self
+            .words
+            .iter()
+            .map(|&(name, word)| (name, Given::Text(word.into())));
+        let numbers = self
+            .numbers
+            .iter()
+            .map(|&(name, number)| (name, Given::Number(number)));
+        for (name, given) in words.chain(numbers) {
+            entries
+                .put(name, Some(given), &[])
+                .expect("a field that is not given twice");
+        }
+        Case::read(&entries, &UnitChoice::default(), Fluids::built_in())
+    }
+}
+
+/// A body with one size, to be scaled.
+pub struct Body {
+    /// Its geometry.
+    pub geometry: &'static str,
+    /// Its dimensions, m, and the angle of an inclined plate.
+    pub dimensions: &'static [(&'static str, f64)],
+    /// The side of a plate.
+    pub facing: Option<&'static str>,
+}
+
+/// Every open body, plates with either side to the fluid.
+pub const BODIES: [Body; 8] = [
+    body("vertical-plate", &[("height", 1.0), ("width", 0.7)], None),
+    body("inclined-plate", LEANING, Some("up")),
+    body("inclined-plate", LEANING, Some("down")),
+    body("horizontal-plate", LEVEL, Some("up")),
+    body("horizontal-plate", LEVEL, Some("down")),
+    body(
+        "horizontal-cylinder",
+        &[("diameter", 0.1), ("length", 3.0)],
+        None,
+    ),
+    body(
+        "vertical-cylinder",
+        &[("diameter", 0.2), ("height", 1.0)],
+        None,
+    ),
+    body("sphere", &[("diameter", 0.2)], None),
+];
+
+const LEANING: &[(&str, f64)] = &[("length", 1.0), ("width", 0.7), (TILT, 40.0)];
+const LEVEL: &[(&str, f64)] = &[("length", 1.0), ("width", 0.7)];
+const TILT: &str = "tilt_from_vertical";
+
+const fn body(
+    geometry: &'static str,
+    dimensions: &'static [(&'static str, f64)],
+    facing: Option<&'static str>,
+) -> Body {
+    Body {
+        geometry,
+        dimensions,
+        facing,
+    }
+}
+
+impl Body {
+    /// The body in a fluid, all lengths times a factor.
+    pub fn draft(&self, fluid: &'static str, scale: f64) -> Draft {
+        let draft = Draft::new(self.geometry, fluid);
+        let faced = match self.facing {
+            Some(facing) => draft.word("facing", facing),
+            None => draft,
+        };
+        self.dimensions.iter().fold(faced, |draft, &(name, value)| {
+            draft.number(name, if name == TILT { value } else { value * scale })
+        })
+    }
+
+    /// Its name in a failure.
+    pub fn label(&self) -> String {
+        format!("{} {}", self.geometry, self.facing.unwrap_or_default())
+    }
+}

@@ -27,7 +27,11 @@ fn content(document: &Value) -> Markup {
         p { (text(&document["info"]["description"])) }
         p { "Version " (text(&document["info"]["version"])) ". " a href="/openapi.json" { "OpenAPI document" } " · " a href="/" { "front page" } }
         h2 { "Calls" }
-        @for (path, verb, call) in calls(document) { (operation(path, verb, call)) }
+        @for tag in document["tags"].as_array().into_iter().flatten() {
+            @for (path, verb, call) in calls(document).filter(|(_, _, call)| call["tags"][0] == tag["name"]) {
+                (operation(path, verb, call))
+            }
+        }
         h2 { "Shapes" }
         @for (name, schema) in members(&document["components"]["schemas"]) { (shape(name, schema)) }
         h2 { "Notes" }

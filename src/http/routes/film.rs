@@ -4,8 +4,8 @@ use axum::extract::State;
 use axum::http::HeaderMap;
 use axum::response::{IntoResponse, Response};
 use utoipa::IntoParams;
-use utoipa::openapi::path::{Parameter, ParameterBuilder, ParameterIn};
-use utoipa::openapi::{ObjectBuilder, Required, Type};
+use utoipa::openapi::path::{Parameter, ParameterIn};
+use utoipa::openapi::{ObjectBuilder, Type};
 
 use crate::case::{Answer, Case, Cell, Column, Entries, Fault, Given, Wanted};
 use crate::film::evaluate;
@@ -14,7 +14,7 @@ use crate::http::answer::FilmReply;
 use crate::http::extract::{AcceptsJson, FilmInput, JsonBody, Query, QueryOptions, read_film_body};
 use crate::http::problem::{Problem, ProblemBody};
 use crate::http::reply::{Body, internal, json, tagged, text};
-use crate::http::schema::{FilmAnswer, FilmRequest, field_schema};
+use crate::http::schema::{FilmAnswer, FilmRequest, field_schema, parameter};
 use crate::http::service::Service;
 use crate::quantity::{Kind, Unit, UnitChoice};
 
@@ -50,14 +50,12 @@ impl IntoParams for FilmQuery {
     fn into_params(_: impl Fn() -> Option<ParameterIn>) -> Vec<Parameter> {
         let fields = Field::ALL.iter().map(|&field| {
             let required = matches!(field, Field::Geometry | Field::AmbientTemperature);
-            parameter(field.name(), field.entry().text)
-                .required(if required {
-                    Required::True
-                } else {
-                    Required::False
-                })
-                .schema(Some(field_schema(field)))
-                .build()
+            parameter(
+                field.name(),
+                field.entry().text,
+                required,
+                field_schema(field),
+            )
         });
         let texts = [
             (
@@ -78,30 +76,19 @@ impl IntoParams for FilmQuery {
             ("as", "unit of the one figure wanted", "W/(m2 K)"),
         ];
         let options = texts.map(|(name, text, example)| {
-            parameter(name, text)
-                .required(Required::False)
-                .schema(Some(
-                    ObjectBuilder::new()
-                        .schema_type(Type::String)
-                        .examples([example]),
-                ))
-                .build()
+            let schema = ObjectBuilder::new()
+                .schema_type(Type::String)
+                .examples([example]);
+            parameter(name, text, false, schema)
         });
         fields.chain(options).collect()
     }
 }
 
-fn parameter(name: &str, text: &str) -> ParameterBuilder {
-    ParameterBuilder::new()
-        .name(name)
-        .parameter_in(ParameterIn::Query)
-        .description(Some(text))
-}
-
 /// Answer one case from a query, whole or as a bare figure.
 #[utoipa::path(
     get, path = "/v1/film", operation_id = "read_film", tag = "film",
-    description = "The same as POST /v1/film from a query. With `want` the answer is plain text for a cell of a calculation sheet. `errors=cell` turns an error into a short text with status 200, for sheets that show nothing of a refused call.",
+    description = "The same as POST /v1/film from a query. With want= the answer is plain text for a cell of a calculation sheet. errors=cell turns an error into a short text with status 200, for sheets that show nothing of a refused call.",
     params(FilmQuery),
     responses(
         (status = 200, description = "the answer, or the figures wanted", content(

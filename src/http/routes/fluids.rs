@@ -6,6 +6,7 @@ use axum::extract::{Path, State};
 use axum::http::HeaderMap;
 use axum::response::Response;
 use serde::Serialize;
+use utoipa::openapi::path::{Parameter, ParameterIn};
 use utoipa::{IntoParams, ToSchema};
 
 use crate::case::{Fault, STANDARD_PRESSURE, shown};
@@ -14,7 +15,7 @@ use crate::http::answer::{PropertiesReply, property_units};
 use crate::http::extract::{AcceptsJson, Query, read_query_quantity};
 use crate::http::problem::{Problem, ProblemBody, ProblemKind};
 use crate::http::reply::{json, tagged};
-use crate::http::schema::Properties;
+use crate::http::schema::{Properties, quantity_parameter};
 use crate::http::service::Service;
 use crate::quantity::{Kind, UnitChoice, nearest};
 
@@ -180,16 +181,25 @@ pub struct FluidState<'a> {
 }
 
 /// The parameters of a state.
-#[derive(IntoParams)]
-#[into_params(parameter_in = Query)]
-#[allow(dead_code, reason = "describes the query, which is read by name")]
-pub struct StateQuery {
-    /// Temperature of the fluid.
-    #[param(schema_with = crate::http::schema::temperature, required = true)]
-    temperature: f64,
-    /// Absolute pressure, 101325 Pa when not given.
-    #[param(schema_with = crate::http::schema::pressure, required = false)]
-    pressure: Option<f64>,
+pub struct StateQuery;
+
+impl IntoParams for StateQuery {
+    fn into_params(_: impl Fn() -> Option<ParameterIn>) -> Vec<Parameter> {
+        vec![
+            quantity_parameter(
+                "temperature",
+                "temperature of the fluid",
+                true,
+                Kind::Temperature,
+            ),
+            quantity_parameter(
+                "pressure",
+                "absolute pressure, 101325 Pa when not given",
+                false,
+                Kind::Pressure,
+            ),
+        ]
+    }
 }
 
 /// The properties of a fluid at a temperature and a pressure.
