@@ -17,13 +17,13 @@ choice! {
 }
 
 choice! {
-    /// Which way the layer next to a plate pulls.
+    /// Which way the layer next to a plate or between two pulls.
     Side {
         /// The method does not depend on it.
         Any = "any",
-        /// The layer leaves the surface: warm facing up, or cold facing down.
+        /// The layer leaves the surface: warm facing up, or cold facing down; a gap heated from below.
         Unstable = "unstable",
-        /// The layer clings to the surface: warm facing down, or cold facing up.
+        /// The layer clings to the surface: warm facing down, or cold facing up; a gap heated from above.
         Stable = "stable",
     }
 }
@@ -132,6 +132,8 @@ pub struct Method {
     pub heating: Heating,
     /// The side of a plate it is for.
     pub side: Side,
+    /// Whether it takes part in the automatic choice.
+    pub automatic: bool,
     /// The formula as text.
     pub formula: &'static str,
     /// Where it was published.

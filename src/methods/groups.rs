@@ -4,19 +4,29 @@ use std::fmt;
 
 use crate::geometry::choice;
 
-/// What a formula sees of a case.
-#[derive(Clone, Copy, Debug, PartialEq)]
+/// What a formula sees of a case. What a body does not have is 0.
+#[derive(Clone, Copy, Debug, Default, PartialEq)]
 pub struct Groups {
     /// Rayleigh number on the body's characteristic length.
     pub rayleigh: f64,
     /// Prandtl number.
     pub prandtl: f64,
-    /// Angle between an inclined surface and the vertical, degrees.
+    /// Angle of a plate or cylinder from the vertical, of a layer from the horizontal, degrees.
     pub tilt: f64,
-    /// Height of an upright cylinder over its diameter.
+    /// Height or length of a cylinder over its diameter.
     pub slenderness: f64,
     /// Area over perimeter of an inclined plate, over its length along the slope.
     pub length_ratio: f64,
+    /// Height of a layer, cavity or channel over its gap.
+    pub aspect: f64,
+    /// Longer horizontal side of a block over the root of its whole area.
+    pub block_length: f64,
+    /// Shorter horizontal side, likewise.
+    pub block_width: f64,
+    /// Height, likewise.
+    pub block_height: f64,
+    /// How many walls of a channel are heated.
+    pub heated_walls: f64,
 }
 
 impl Groups {
@@ -28,12 +38,27 @@ impl Groups {
             tilt: 0.0,
             slenderness: 0.0,
             length_ratio: 0.0,
+            aspect: 0.0,
+            block_length: 0.0,
+            block_width: 0.0,
+            block_height: 0.0,
+            heated_walls: 0.0,
         }
     }
 
-    /// The same with an angle from the vertical, degrees.
+    /// The same with an angle, degrees.
     pub const fn tilted(self, tilt: f64) -> Self {
         Groups { tilt, ..self }
+    }
+
+    /// The same with a height over the gap.
+    pub const fn with_aspect(self, aspect: f64) -> Self {
+        Groups { aspect, ..self }
+    }
+
+    /// The same with a height or length over the diameter.
+    pub const fn with_slenderness(self, slenderness: f64) -> Self {
+        Groups { slenderness, ..self }
     }
 
     /// The same with another Rayleigh number.
@@ -44,6 +69,11 @@ impl Groups {
     /// Rayleigh number with the part of gravity that lies along an inclined surface.
     pub fn rayleigh_along(&self) -> f64 {
         self.rayleigh * self.tilt.to_radians().cos()
+    }
+
+    /// Rayleigh number weighted for thin boundary layers.
+    pub fn rayleigh_weighted(&self) -> f64 {
+        self.rayleigh * self.prandtl / (0.2 + self.prandtl)
     }
 
     /// Curvature of the boundary layer on an upright cylinder, `32^(1/2) Gr_H^(-1/4) H/D`.
@@ -62,12 +92,24 @@ choice! {
         Rayleigh = "rayleigh",
         /// Rayleigh number with gravity along the slope.
         RayleighAlong = "rayleigh_along_slope",
+        /// Rayleigh number weighted for thin boundary layers, `Ra Pr/(0.2 + Pr)`.
+        RayleighWeighted = "rayleigh_weighted",
+        /// Rayleigh number of a channel, `Ra S/H`.
+        RayleighChannel = "rayleigh_channel",
+        /// Grashof number on the diameter of an inclined cylinder.
+        DiameterGrashof = "diameter_grashof",
         /// Prandtl number.
         Prandtl = "prandtl",
         /// Angle from the vertical, degrees.
         Tilt = "tilt_from_vertical",
+        /// Angle of a layer from the horizontal, degrees.
+        LayerTilt = "tilt_from_horizontal",
         /// Curvature of the boundary layer on an upright cylinder.
         Curvature = "curvature",
+        /// Height over gap.
+        Aspect = "aspect",
+        /// How many walls of a channel are heated.
+        HeatedWalls = "heated_walls",
     }
 }
 
@@ -89,9 +131,16 @@ impl Quantity {
         match self {
             Quantity::Rayleigh => groups.rayleigh,
             Quantity::RayleighAlong => groups.rayleigh_along(),
+            Quantity::RayleighWeighted => groups.rayleigh_weighted(),
+            Quantity::RayleighChannel => groups.rayleigh / groups.aspect,
+            Quantity::DiameterGrashof => {
+                groups.rayleigh / (groups.prandtl * groups.slenderness.powi(3))
+            }
             Quantity::Prandtl => groups.prandtl,
-            Quantity::Tilt => groups.tilt,
+            Quantity::Tilt | Quantity::LayerTilt => groups.tilt,
             Quantity::Curvature => groups.curvature(),
+            Quantity::Aspect => groups.aspect,
+            Quantity::HeatedWalls => groups.heated_walls,
         }
     }
 
@@ -100,27 +149,58 @@ impl Quantity {
         match self {
             Quantity::Rayleigh => "Ra",
             Quantity::RayleighAlong => "Ra cos(tilt)",
+            Quantity::RayleighWeighted => "Ra Pr/(0.2 + Pr)",
+            Quantity::RayleighChannel => "Ra S/H",
+            Quantity::DiameterGrashof => "Gr on the diameter",
             Quantity::Prandtl => "Pr",
             Quantity::Tilt => "tilt from vertical",
+            Quantity::LayerTilt => "tilt from horizontal",
             Quantity::Curvature => "32^(1/2) Gr^(-1/4) H/D",
+            Quantity::Aspect => "height over gap",
+            Quantity::HeatedWalls => "heated walls",
         }
     }
 
     /// The widest value below and above a bound that still counts as near it.
     fn near(self, bound: f64) -> (f64, f64) {
         match self {
-            Quantity::Rayleigh | Quantity::RayleighAlong => (bound / 10.0, bound * 10.0),
-            Quantity::Prandtl | Quantity::Curvature => (bound / 1.5, bound * 1.5),
-            Quantity::Tilt => (bound - 5.0, bound + 5.0),
+            Quantity::Rayleigh
+            | Quantity::RayleighAlong
+            | Quantity::RayleighWeighted
+            | Quantity::RayleighChannel
+            | Quantity::DiameterGrashof => (bound / 10.0, bound * 10.0),
+            Quantity::Prandtl | Quantity::Curvature | Quantity::Aspect => {
+                (bound / 1.5, bound * 1.5)
+            }
+            Quantity::Tilt | Quantity::LayerTilt => (bound - 5.0, bound + 5.0),
+            Quantity::HeatedWalls => (bound, bound),
         }
+    }
+
+    /// Whether it is a Rayleigh or Grashof number.
+    pub fn is_buoyancy(self) -> bool {
+        matches!(self.aspect(), Aspect::Rayleigh)
+    }
+
+    /// Whether it is a tilt or a proportion.
+    pub fn is_shape(self) -> bool {
+        matches!(self.aspect(), Aspect::Shape)
     }
 
     /// What lies outside when this quantity does.
     fn aspect(self) -> Aspect {
         match self {
-            Quantity::Rayleigh | Quantity::RayleighAlong => Aspect::Rayleigh,
+            Quantity::Rayleigh
+            | Quantity::RayleighAlong
+            | Quantity::RayleighWeighted
+            | Quantity::RayleighChannel
+            | Quantity::DiameterGrashof => Aspect::Rayleigh,
             Quantity::Prandtl => Aspect::Prandtl,
-            Quantity::Tilt | Quantity::Curvature => Aspect::Shape,
+            Quantity::Tilt
+            | Quantity::LayerTilt
+            | Quantity::Curvature
+            | Quantity::Aspect
+            | Quantity::HeatedWalls => Aspect::Shape,
         }
     }
 }
@@ -140,8 +220,10 @@ pub struct Range {
     pub minimum: f64,
     /// Upper end, infinite where the source sets none.
     pub maximum: f64,
-    /// Whether the formula tends to the right limit below the band, so that any value below counts as near it.
-    pub limit_below: bool,
+    /// Whether any value below the band is answered with a note: the formula tends to the right limit, or is the nearest there is.
+    pub answered_below: bool,
+    /// Whether any value above the band is answered with a note, as the nearest there is.
+    pub answered_above: bool,
 }
 
 impl Range {
@@ -151,7 +233,8 @@ impl Range {
             quantity,
             minimum,
             maximum,
-            limit_below: false,
+            answered_below: false,
+            answered_above: false,
         }
     }
 
@@ -160,10 +243,18 @@ impl Range {
         Self::between(quantity, minimum, f64::INFINITY)
     }
 
-    /// The same band of a formula that tends to the right limit below it.
-    pub const fn with_limit_below(self) -> Self {
+    /// The same band, answered below with a note.
+    pub const fn answered_below(self) -> Self {
         Range {
-            limit_below: true,
+            answered_below: true,
+            ..self
+        }
+    }
+
+    /// The same band, answered above with a note.
+    pub const fn answered_above(self) -> Self {
+        Range {
+            answered_above: true,
             ..self
         }
     }
@@ -184,15 +275,18 @@ impl Range {
     fn status(&self, value: f64) -> RangeStatus {
         let (lowest, _) = self.quantity.near(self.minimum);
         let (_, highest) = self.quantity.near(self.maximum);
-        if value >= self.minimum && value <= self.maximum {
+        if (self.minimum..=self.maximum).contains(&value) {
             RangeStatus::Within
-        } else if value < self.minimum && (self.limit_below || value >= lowest)
-            || value > self.maximum && value <= highest
-        {
+        } else if (lowest..=highest).contains(&value) || self.is_answered(value) {
             RangeStatus::Near
         } else {
             RangeStatus::Beyond
         }
+    }
+
+    /// Whether a value outside lies on a side that is answered all the same.
+    fn is_answered(&self, value: f64) -> bool {
+        value < self.minimum && self.answered_below || value > self.maximum && self.answered_above
     }
 }
 
@@ -223,6 +317,8 @@ fn shown(value: f64) -> String {
 pub struct Verdict {
     /// The worst of all.
     pub status: RangeStatus,
+    /// Nothing is outside but on sides that are answered all the same.
+    pub usable: bool,
     /// A Rayleigh number is too small.
     pub rayleigh_below: bool,
     /// A Rayleigh number is too large.
@@ -238,6 +334,7 @@ impl Verdict {
     pub fn of(ranges: &[Range], groups: &Groups) -> Self {
         let mut verdict = Verdict {
             status: RangeStatus::Within,
+            usable: true,
             rayleigh_below: false,
             rayleigh_above: false,
             prandtl_outside: false,
@@ -250,6 +347,7 @@ impl Verdict {
                 continue;
             }
             verdict.status = verdict.status.max(status);
+            verdict.usable &= range.is_answered(value);
             match range.quantity.aspect() {
                 Aspect::Rayleigh if value < range.minimum => verdict.rayleigh_below = true,
                 Aspect::Rayleigh => verdict.rayleigh_above = true,
@@ -275,7 +373,7 @@ mod tests {
         assert_eq!(status(1e10), RangeStatus::Near);
         assert_eq!(status(9.9e2), RangeStatus::Beyond);
         assert_eq!(status(1.1e10), RangeStatus::Beyond);
-        assert_eq!(range.with_limit_below().status(0.0), RangeStatus::Near);
+        assert_eq!(range.answered_below().status(0.0), RangeStatus::Near);
     }
 
     #[test]

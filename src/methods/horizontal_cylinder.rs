@@ -13,9 +13,10 @@ pub static CHURCHILL_CHU: Method = Method {
     geometry: HorizontalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: true,
     formula: "Nu = {0.60 + 0.387 Ra^(1/6) / [1 + (0.559/Pr)^(9/16)]^(8/27)}^2",
     source: CHURCHILL_CHU_CYLINDER,
-    ranges: &[Range::between(Quantity::Rayleigh, 1e-5, 1e12).with_limit_below()],
+    ranges: &[Range::between(Quantity::Rayleigh, 1e-5, 1e12).answered_below()],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
     remark: "17 to 18 % below the banded and blended methods at Ra 1 to 100, up to 16 % above the blend at 1e7 to 1e9. Tends to 0.36 as Ra tends to 0.",
@@ -26,18 +27,17 @@ pub static CHURCHILL_CHU: Method = Method {
         from: "Cengel, Heat Transfer, example 9-1",
     },
     edges: &[],
-    nusselt: |g| {
-        (0.60 + 0.387 * g.rayleigh.powf(1.0 / 6.0) / f9(g.prandtl, 0.559).powf(8.0 / 27.0)).powi(2)
-    },
+    nusselt: full_range,
 };
 
 pub static CHURCHILL_CHU_LAMINAR: Method = Method {
     geometry: HorizontalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "Nu = 0.36 + 0.518 Ra^(1/4) / [1 + (0.559/Pr)^(9/16)]^(4/9)",
     source: CHURCHILL_CHU_CYLINDER,
-    ranges: &[Range::between(Quantity::Rayleigh, 1e-6, 1e9).with_limit_below()],
+    ranges: &[Range::between(Quantity::Rayleigh, 1e-6, 1e9).answered_below()],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
     remark: "Tends to 0.36 as Ra tends to 0.",
@@ -55,6 +55,7 @@ pub static MORGAN: Method = Method {
     geometry: HorizontalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "Nu = C Ra^n: (0.675, 0.058) to Ra 1e-2, (1.02, 0.148) to 1e2, (0.850, 0.188) to 1e4, (0.480, 0.250) to 1e7, (0.125, 0.333) to 1e12",
     source: Source {
         authors: "Morgan, V. T.",
@@ -92,9 +93,10 @@ pub static RAITHBY_HOLLANDS: Method = Method {
     geometry: HorizontalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "Nu = (Nu_l^10 + Nu_t^10)^(1/10), Nu_l = 2 f/ln(1 + 2 f/Nu_T), f = 1 - 0.13/Nu_T^0.16, Nu_T = 0.772 C_l Ra^(1/4), Nu_t = C_t Ra^(1/3), C_t the turbulent constant averaged over the circumference",
     source: HANDBOOK,
-    ranges: &[Range::between(Quantity::Rayleigh, 1e-10, 1e12).with_limit_below()],
+    ranges: &[Range::between(Quantity::Rayleigh, 1e-10, 1e12).answered_below()],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
     remark: "f is held at 0.3 below Nu_T 2.7e-5, where the printed form would turn negative.",
@@ -120,6 +122,7 @@ pub static KUEHN_GOLDSTEIN: Method = Method {
     geometry: HorizontalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "2/Nu = ln(1 + 2/{[0.518 Ra^(1/4) (1 + (0.559/Pr)^(3/5))^(-5/12)]^15 + (0.1 Ra^(1/3))^15}^(1/15))",
     source: Source {
         authors: "Kuehn, T. H.; Goldstein, R. J.",
@@ -127,7 +130,7 @@ pub static KUEHN_GOLDSTEIN: Method = Method {
         work: "Int. J. Heat Mass Transfer 19",
         locator: "1127-1134",
     },
-    ranges: &[Range::between(Quantity::Rayleigh, 1e-10, 1e12).with_limit_below()],
+    ranges: &[Range::between(Quantity::Rayleigh, 1e-10, 1e12).answered_below()],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
     remark: "",
@@ -149,6 +152,7 @@ pub static POWER_LAW: Method = Method {
     geometry: HorizontalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "Nu = 0.53 Ra^(1/4) to Ra 1e9, 0.13 Ra^(1/3) beyond",
     source: MCADAMS,
     ranges: &[
@@ -173,3 +177,8 @@ pub static POWER_LAW: Method = Method {
         }
     },
 };
+
+/// Churchill and Chu's form for all flows.
+pub(super) fn full_range(g: &Groups) -> f64 {
+    (0.60 + 0.387 * g.rayleigh.powf(1.0 / 6.0) / f9(g.prandtl, 0.559).powf(8.0 / 27.0)).powi(2)
+}

@@ -20,10 +20,11 @@ pub static RAITHBY_HOLLANDS_UNSTABLE: Method = Method {
     geometry: InclinedPlate,
     heating: Heating::Either,
     side: Side::Unstable,
+    automatic: true,
     formula: "Nu = max{Nu_v(Ra cos t), Nu_h(Ra sin t r^3)/r}: Nu_v the upright plate's blend on the length L, Nu_h the level plate's for a layer that leaves it on A/P, t the tilt from vertical, r = (A/P)/L",
     source: HANDBOOK,
     ranges: &[
-        Range::between(Quantity::Rayleigh, 0.1, 1e12).with_limit_below(),
+        Range::between(Quantity::Rayleigh, 0.1, 1e12).answered_below(),
         ANY_TILT,
     ],
     reference: ReferenceTemperature::Film,
@@ -43,10 +44,11 @@ pub static VLIET_UNSTABLE: Method = Method {
     geometry: InclinedPlate,
     heating: Heating::Either,
     side: Side::Unstable,
+    automatic: false,
     formula: "Nu = (Nu_l^6 + Nu_t^6)^(1/6): the upright plate's blend, laminar part with Ra cos t, turbulent part with Ra",
     source: VLIET,
     ranges: &[
-        Range::between(Quantity::Rayleigh, 0.1, 1e12).with_limit_below(),
+        Range::between(Quantity::Rayleigh, 0.1, 1e12).answered_below(),
         Range::between(Quantity::Tilt, 0.0, 60.0),
     ],
     reference: ReferenceTemperature::Film,
@@ -72,6 +74,7 @@ pub static FUJII_IMURA_UNSTABLE: Method = Method {
     geometry: InclinedPlate,
     heating: Heating::Either,
     side: Side::Unstable,
+    automatic: false,
     formula: "Nu = 0.145 (Ra^(1/3) - Ra_c^(1/3)) + 0.56 (Ra_c cos t)^(1/4) above Ra_c = Gr_c Pr, 0.56 (Ra cos t)^(1/4) below; Gr_c 5e9 at 15, 2e9 at 30, 1e8 at 60, 1e6 at 75 degrees, log-interpolated",
     source: FUJII_IMURA,
     ranges: &[
@@ -104,10 +107,11 @@ pub static RAITHBY_HOLLANDS_STABLE: Method = Method {
     geometry: InclinedPlate,
     heating: Heating::Either,
     side: Side::Stable,
+    automatic: true,
     formula: "Nu = max{Nu_v(Ra cos t), Nu_h(Ra sin t r^3)/r}: Nu_v the upright plate's blend on the length L, Nu_h the level plate's for a layer that clings to it on A/P, t the tilt from vertical, r = (A/P)/L",
     source: HANDBOOK,
     ranges: &[
-        Range::between(Quantity::Rayleigh, 0.1, 1e12).with_limit_below(),
+        Range::between(Quantity::Rayleigh, 0.1, 1e12).answered_below(),
         ANY_TILT,
     ],
     reference: ReferenceTemperature::Film,
@@ -127,10 +131,11 @@ pub static CHURCHILL_CHU_LAMINAR: Method = Method {
     geometry: InclinedPlate,
     heating: Heating::Either,
     side: Side::Stable,
+    automatic: false,
     formula: "Nu = 0.68 + 0.670 (Ra cos t)^(1/4) / [1 + (0.492/Pr)^(9/16)]^(4/9)",
     source: CHURCHILL_CHU_PLATE,
     ranges: &[
-        Range::between(Quantity::RayleighAlong, 0.1, 1e9).with_limit_below(),
+        Range::between(Quantity::RayleighAlong, 0.1, 1e9).answered_below(),
         Range::between(Quantity::Tilt, 0.0, 60.0),
     ],
     reference: ReferenceTemperature::Film,
@@ -150,6 +155,7 @@ pub static VLIET_ROSS: Method = Method {
     geometry: InclinedPlate,
     heating: Heating::Either,
     side: Side::Stable,
+    automatic: false,
     formula: "Nu = (Nu_l^6 + Nu_t^6)^(1/6): the upright plate's blend, laminar part with Ra cos t, turbulent part with Ra cos^2 t",
     source: Source {
         authors: "Vliet, G. C.; Ross, D. C.",
@@ -158,7 +164,7 @@ pub static VLIET_ROSS: Method = Method {
         locator: "549-554",
     },
     ranges: &[
-        Range::between(Quantity::Rayleigh, 0.1, 1e12).with_limit_below(),
+        Range::between(Quantity::Rayleigh, 0.1, 1e12).answered_below(),
         Range::between(Quantity::Tilt, 0.0, 80.0),
     ],
     reference: ReferenceTemperature::Film,
@@ -186,6 +192,7 @@ pub static FUJII_IMURA_STABLE: Method = Method {
     geometry: InclinedPlate,
     heating: Heating::Either,
     side: Side::Stable,
+    automatic: false,
     formula: "Nu = 0.56 (Ra cos t)^(1/4)",
     source: FUJII_IMURA,
     ranges: &[
@@ -212,11 +219,8 @@ const FUJII_IMURA_REFERENCE: ReferenceTemperature = ReferenceTemperature::Weight
 };
 
 const LEANING: Groups = Groups {
-    rayleigh: 3e9,
-    prandtl: 0.7,
-    tilt: 45.0,
-    slenderness: 0.0,
     length_ratio: 0.25,
+    ..Groups::new(3e9, 0.7).tilted(45.0)
 };
 
 /// The larger heat flow of the upright and the level part.

@@ -1,16 +1,24 @@
 //! The registry of published methods: from dimensionless groups to a Nusselt number.
 //!
 //! A method is one literal in its body's file; the list below names it, and is the only list of ids.
-//! Within a body, heating and side, the first one listed is the automatic choice.
+//! Within a body, heating and side, the automatic choice goes through the ones marked for it in the order of the list.
 
+mod choice;
+mod concentric;
+mod convex_body;
 mod entry;
 mod groups;
 mod horizontal_cylinder;
+mod horizontal_layer;
 mod horizontal_plate;
+mod inclined_cylinder;
 mod inclined_plate;
 mod layers;
+mod parallel_plates;
 mod sources;
 mod sphere;
+mod tilted_layer;
+mod vertical_cavity;
 mod vertical_cylinder;
 mod vertical_plate;
 
@@ -20,6 +28,7 @@ use std::sync::LazyLock;
 use crate::digest::sha256;
 use crate::geometry::{Geometry, choice};
 
+pub use choice::choose;
 pub use entry::{Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source};
 pub use groups::{Groups, Quantity, Range, RangeStatus, Verdict};
 pub use vertical_cylinder::curvature_factor;
@@ -78,6 +87,49 @@ registry! {
         VerticalCylinderLefevreEde = "vertical-cylinder-lefevre-ede", LEFEVRE_EDE;
         VerticalCylinderChurchillChu = "vertical-cylinder-churchill-chu", CHURCHILL_CHU;
     }
+    inclined_cylinder {
+        InclinedCylinderRaithbyHollands = "inclined-cylinder-raithby-hollands", RAITHBY_HOLLANDS;
+        InclinedCylinderAlArabiKhamis = "inclined-cylinder-al-arabi-khamis", AL_ARABI_KHAMIS;
+    }
+    convex_body {
+        BlockHassaniHollands = "block-hassani-hollands", BLOCK;
+        BlockYovanovich = "block-yovanovich", BLOCK_LAMINAR;
+        UprightShortCylinderHassaniHollands = "upright-short-cylinder-hassani-hollands", UPRIGHT;
+        UprightShortCylinderYovanovich = "upright-short-cylinder-yovanovich", UPRIGHT_LAMINAR;
+        LyingShortCylinderHassaniHollands = "lying-short-cylinder-hassani-hollands", LYING;
+        LyingShortCylinderYovanovich = "lying-short-cylinder-yovanovich", LYING_LAMINAR;
+    }
+    horizontal_layer {
+        HorizontalLayerHollandsRaithbyKonicek = "horizontal-layer-hollands-raithby-konicek", HOLLANDS_RAITHBY_KONICEK;
+        HorizontalLayerHollands = "horizontal-layer-hollands", HOLLANDS;
+        HorizontalLayerGlobeDropkin = "horizontal-layer-globe-dropkin", GLOBE_DROPKIN;
+        HorizontalLayerEn673 = "horizontal-layer-en673", GLAZING;
+        HorizontalLayerConduction = "horizontal-layer-conduction", CONDUCTION;
+    }
+    tilted_layer {
+        TiltedLayerHollandsUnnyRaithbyKonicek = "tilted-layer-hollands-unny-raithby-konicek", HOLLANDS_UNNY_RAITHBY_KONICEK;
+        TiltedLayerElsherbiny = "tilted-layer-elsherbiny", ELSHERBINY;
+        TiltedLayerCatton = "tilted-layer-catton", CATTON;
+        TiltedLayerEn673 = "tilted-layer-en673", GLAZING;
+    }
+    vertical_cavity {
+        VerticalCavityElsherbiny = "vertical-cavity-elsherbiny", ELSHERBINY;
+        VerticalCavityBerkovskyPolevikov = "vertical-cavity-berkovsky-polevikov", LOW;
+        VerticalCavityCatton = "vertical-cavity-catton", CATTON;
+        VerticalCavityMacgregorEmeryTurbulent = "vertical-cavity-macgregor-emery-turbulent", MACGREGOR_EMERY_TURBULENT;
+        VerticalCavityMacgregorEmery = "vertical-cavity-macgregor-emery", TALL;
+        VerticalCavityWright = "vertical-cavity-wright", WRIGHT;
+        VerticalCavityEn673 = "vertical-cavity-en673", GLAZING;
+    }
+    concentric {
+        ConcentricCylindersRaithbyHollands = "concentric-cylinders-raithby-hollands", CYLINDERS;
+        ConcentricSpheresRaithbyHollands = "concentric-spheres-raithby-hollands", SPHERES;
+    }
+    parallel_plates {
+        ParallelPlatesBarCohenRohsenow = "parallel-plates-bar-cohen-rohsenow", ISOTHERMAL;
+        ParallelPlatesElenbaas = "parallel-plates-elenbaas", ELENBAAS;
+        ParallelPlatesBarCohenRohsenowUniformFlux = "parallel-plates-bar-cohen-rohsenow-uniform-flux", UNIFORM_FLUX;
+    }
     sphere {
         SphereChurchill = "sphere-churchill", CHURCHILL;
         SphereYuge = "sphere-yuge", YUGE;
@@ -89,17 +141,6 @@ impl MethodId {
     /// What the registry knows of it.
     pub fn method(self) -> &'static Method {
         METHODS[self as usize]
-    }
-
-    /// Whether it is the automatic choice of its body for some heating and side.
-    pub fn is_automatic(self) -> bool {
-        let geometry = self.method().geometry;
-        [Heating::Isothermal, Heating::UniformFlux]
-            .iter()
-            .any(|&heating| {
-                let mut sides = Side::ALL.iter();
-                sides.any(|&side| MethodId::serving(geometry, heating, side).first() == Some(&self))
-            })
     }
 
     /// The methods of a body for a heating and a side, the automatic choice first.
@@ -128,6 +169,14 @@ fn listed(geometry: Geometry, heating: Heating, side: Side) -> Vec<MethodId> {
         method.geometry == geometry && method.serves(heating, side)
     };
     MethodId::ALL.iter().copied().filter(serves).collect()
+}
+
+/// Nusselt number of an isothermal body by the automatic choice.
+fn automatic_nusselt(geometry: Geometry, side: Side, groups: &Groups) -> f64 {
+    let methods = MethodId::serving(geometry, Heating::Isothermal, side).iter();
+    let automatic = methods.map(|id| id.method()).filter(|method| method.automatic);
+    choose(automatic, |method| method.verdict(groups))
+        .map_or(1.0, |method| (method.nusselt)(groups))
 }
 
 /// Digest of everything the registry says of its methods: ids, formulas, sources, ranges and examples.

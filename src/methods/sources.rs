@@ -49,3 +49,11 @@ pub const VLIET: Source = Source {
     work: "J. Heat Transfer 91",
     locator: "511-516",
 };
+
+/// Glazing.
+pub const EN_673: Source = Source {
+    authors: "CEN",
+    year: 2011,
+    work: "EN 673, Glass in building: thermal transmittance",
+    locator: "5.3.3, from memory",
+};

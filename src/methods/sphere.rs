@@ -13,6 +13,7 @@ pub static CHURCHILL: Method = Method {
     geometry: Sphere,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: true,
     formula: "Nu = 2 + 0.589 Ra^(1/4) / [1 + (0.469/Pr)^(9/16)]^(4/9)",
     source: Source {
         authors: "Churchill, S. W.",
@@ -41,6 +42,7 @@ pub static YUGE: Method = Method {
     geometry: Sphere,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "Nu = 2 + 0.43 Ra^(1/4)",
     source: Source {
         authors: "Yuge, T.",
@@ -49,7 +51,7 @@ pub static YUGE: Method = Method {
         locator: "214-220",
     },
     ranges: &[
-        Range::between(Quantity::Rayleigh, 1.0, 1e5).with_limit_below(),
+        Range::between(Quantity::Rayleigh, 1.0, 1e5).answered_below(),
         Range::at_least(Quantity::Prandtl, 0.6),
     ],
     reference: ReferenceTemperature::Film,
@@ -69,6 +71,7 @@ pub static RAITHBY_HOLLANDS: Method = Method {
     geometry: Sphere,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: true,
     formula: "Nu = (Nu_l^6 + Nu_t^6)^(1/6), Nu_l = 2 + 0.589 Ra^(1/4) / [1 + (0.469/Pr)^(9/16)]^(4/9), Nu_t = C_t Ra^(1/3), C_t the turbulent constant averaged over the surface",
     source: HANDBOOK,
     ranges: &[

@@ -14,6 +14,7 @@ pub static POPIEL: Method = Method {
     geometry: VerticalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: true,
     formula: "Nu = [(K Nu_l)^6 + Nu_t^6]^(1/6): the upright plate's blend, its laminar part times K = 1 + B [32^(1/2) Gr^(-1/4) H/D]^C, B = 0.0571322 + 0.20305 Pr^(-0.43), C = 0.9165 - 0.0043 Pr^(1/2) + 0.01333 ln Pr + 0.0004809/Pr",
     source: Source {
         authors: "Popiel, C. O.; Wojtkowiak, J.; Bober, K.",
@@ -22,7 +23,7 @@ pub static POPIEL: Method = Method {
         locator: "607-613",
     },
     ranges: &[
-        Range::between(Quantity::Rayleigh, LOWEST_RAYLEIGH, 1e12).with_limit_below(),
+        Range::between(Quantity::Rayleigh, LOWEST_RAYLEIGH, 1e12).answered_below(),
         Range::between(Quantity::Prandtl, 0.01, 100.0),
         Range::between(Quantity::Curvature, 0.0, 5.0),
     ],
@@ -36,19 +37,14 @@ pub static POPIEL: Method = Method {
         from: COMPUTED,
     },
     edges: &[],
-    nusselt: |g| {
-        blend(
-            curvature_factor(g) * vertical_laminar(g.rayleigh, g.prandtl),
-            vertical_turbulent(g.rayleigh, g.prandtl),
-            6.0,
-        )
-    },
+    nusselt: upright,
 };
 
 pub static LEFEVRE_EDE: Method = Method {
     geometry: VerticalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "Nu = (4/3) {7 Ra Pr/[5 (20 + 21 Pr)]}^(1/4) + 4 (272 + 315 Pr) H/[35 (64 + 63 Pr) D]",
     source: Source {
         authors: "LeFevre, E. J.; Ede, A. J.",
@@ -82,23 +78,18 @@ pub static CHURCHILL_CHU: Method = Method {
     geometry: VerticalCylinder,
     heating: Heating::Either,
     side: Side::Any,
+    automatic: false,
     formula: "Nu = {0.825 + 0.387 Ra^(1/6) / [1 + (0.492/Pr)^(9/16)]^(8/27)}^2",
     source: CHURCHILL_CHU_PLATE,
     ranges: &[
-        Range::between(Quantity::Rayleigh, 0.1, 1e12).with_limit_below(),
+        Range::between(Quantity::Rayleigh, 0.1, 1e12).answered_below(),
         Range::between(Quantity::Curvature, 0.0, 0.16),
     ],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
     remark: "The upright plate's form for thick cylinders, D/H of at least 35/Gr^(1/4) (common practice; a 5 % criterion for gases).",
     example: Example {
-        groups: Groups {
-            rayleigh: 7.65e8,
-            prandtl: 0.7202,
-            tilt: 0.0,
-            slenderness: 2.0,
-            length_ratio: 0.0,
-        },
+        groups: Groups::new(7.65e8, 0.7202).with_slenderness(2.0),
         nusselt: 113.3,
         figures: 4,
         from: "Cengel, Heat Transfer, example 9-2 (from memory; a plate)",
@@ -107,13 +98,7 @@ pub static CHURCHILL_CHU: Method = Method {
     nusselt: |g| vertical_plate::full_range(g, 0.492),
 };
 
-const SLENDER: Groups = Groups {
-    rayleigh: 1e8,
-    prandtl: 0.7,
-    tilt: 0.0,
-    slenderness: 20.0,
-    length_ratio: 0.0,
-};
+const SLENDER: Groups = Groups::new(1e8, 0.7).with_slenderness(20.0);
 
 /// The Rayleigh number below which the gain is held: the fit grows without bound as it tends to 0.
 const LOWEST_RAYLEIGH: f64 = 1e2;
@@ -127,4 +112,13 @@ pub fn curvature_factor(g: &Groups) -> f64 {
     let c = 0.9165 - 0.0043 * g.prandtl.sqrt() + 0.01333 * g.prandtl.ln() + 0.0004809 / g.prandtl;
     let held = g.at_rayleigh(g.rayleigh.max(LOWEST_RAYLEIGH));
     1.0 + b * held.curvature().powf(c)
+}
+
+/// The upright plate's blend with the gain in its laminar part.
+pub(super) fn upright(g: &Groups) -> f64 {
+    blend(
+        curvature_factor(g) * vertical_laminar(g.rayleigh, g.prandtl),
+        vertical_turbulent(g.rayleigh, g.prandtl),
+        6.0,
+    )
 }

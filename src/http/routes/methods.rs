@@ -32,7 +32,7 @@ pub struct MethodView {
     /// The side of a plate it is for: any, unstable (warm facing up, cold facing down) or stable.
     #[schema(example = "any")]
     side: &'static str,
-    /// Whether it is its body's automatic choice while its range allows.
+    /// Whether it takes part in its body's automatic choice.
     automatic: bool,
     /// The formula as text.
     #[schema(example = "Nu = 0.53 Ra^(1/4)")]
@@ -90,8 +90,10 @@ pub struct RangeView {
     /// Upper end; null where the source sets none.
     #[schema(example = 1e12)]
     maximum: Option<f64>,
-    /// Whether the formula tends to the right limit below the band and is answered there with a note.
-    limit_below: bool,
+    /// Whether any value below the band is answered with a note.
+    answered_below: bool,
+    /// Whether any value above the band is answered with a note.
+    answered_above: bool,
 }
 
 /// The spread of measurements about a method, a fraction.
@@ -141,6 +143,7 @@ impl MethodView {
             geometry,
             heating,
             side,
+            automatic,
             formula,
             source,
             ranges,
@@ -156,7 +159,7 @@ impl MethodView {
             geometry: geometry.as_str(),
             heating: heating.as_str(),
             side: side.as_str(),
-            automatic: id.is_automatic(),
+            automatic,
             formula,
             source: SourceView {
                 authors: source.authors,
@@ -193,7 +196,8 @@ impl RangeView {
             symbol: range.quantity.symbol(),
             minimum: range.minimum,
             maximum: range.maximum.is_finite().then_some(range.maximum),
-            limit_below: range.limit_below,
+            answered_below: range.answered_below,
+            answered_above: range.answered_above,
         }
     }
 }
