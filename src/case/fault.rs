@@ -49,6 +49,10 @@ pub const CODES: &[(&str, &str)] = &[
     ("duplicate-key", "a choice of units names one thing twice"),
     ("not-a-pair", "a choice of units is not a list of name:unit"),
     (
+        "too-many-faults",
+        "the faults are so many that the rest was not read",
+    ),
+    (
         "outside-limits",
         "the number is outside what the field accepts",
     ),
@@ -92,11 +96,14 @@ impl Fault {
 }
 
 /// A JSON pointer (RFC 6901) as a URI fragment.
+///
+/// Names longer than any field's are cut, so that a refusal stays small.
 pub fn pointer(names: &[&str]) -> String {
+    const LONGEST: usize = 200;
     let mut out = "#".to_owned();
     for name in names {
         out.push('/');
-        for character in name.chars() {
+        for character in name.chars().take(LONGEST) {
             match character {
                 '~' => out.push_str("~0"),
                 '/' => out.push_str("~1"),

@@ -3,7 +3,7 @@
 use crate::fluids::{FluidId, Fluids};
 use crate::geometry::{Extrapolate, Facing, Field, FieldValue, Geometry, Limits};
 use crate::methods::MethodId;
-use crate::quantity::{Kind, UnitChoice, nearest, parse};
+use crate::quantity::{Kind, UnitChoice, nearest, number_text, parse};
 
 use super::entries::{Entries, Given, shown};
 use super::fault::Fault;
@@ -209,10 +209,11 @@ fn check_limits(field: Field, kind: Kind, limits: Limits, value: f64) -> Result<
         field,
         "outside-limits",
         format!(
-            "{} is {value} {unit}; it takes values {from} {} {unit} to {} {unit}",
+            "{} is {} {unit}; it takes values {from} {} {unit} to {} {unit}",
             field.name(),
-            limits.minimum,
-            limits.maximum
+            number_text(value),
+            number_text(limits.minimum),
+            number_text(limits.maximum)
         ),
     ))
 }

@@ -110,8 +110,8 @@ macro_rules! fields {
     };
 }
 
-const LENGTH: FieldValue = FieldValue::Quantity(Kind::Length, Limits::above(0.0, 1e4));
-const TEMPERATURE: FieldValue = FieldValue::Quantity(Kind::Temperature, Limits::above(0.0, 1e5));
+const LENGTH: FieldValue = FieldValue::Quantity(Kind::Length, Limits::from(1e-6, 1e4));
+const TEMPERATURE: FieldValue = FieldValue::Quantity(Kind::Temperature, Limits::from(1.0, 1e5));
 
 fields! {
     Geometry = "geometry", FieldValue::Choice(super::Geometry::TEXTS),
@@ -120,7 +120,7 @@ fields! {
     Length = "length", LENGTH, "extent along the slope, the axis or the longer side", "\"6 m\"";
     Width = "width", LENGTH, "horizontal extent of a plate", "\"2.8 m\"";
     Diameter = "diameter", LENGTH, "outside diameter", "\"88.9 mm\"";
-    Area = "area", FieldValue::Quantity(Kind::Area, Limits::above(0.0, 1e8)),
+    Area = "area", FieldValue::Quantity(Kind::Area, Limits::from(1e-12, 1e8)),
         "area of the face that is asked about", "\"4.2 m2\"";
     Perimeter = "perimeter", LENGTH, "length of the edge around a horizontal plate", "\"8.6 m\"";
     TiltFromVertical = "tilt_from_vertical",

@@ -156,11 +156,17 @@ impl IntoResponse for Problem {
         // Strings and small numbers always serialize.
         let body = serde_json::to_vec(&self.body()).unwrap_or_default();
         let content_type = HeaderValue::from_static("application/problem+json");
-        (
+        let mut response = (
             self.kind.status(),
             [(header::CONTENT_TYPE, content_type)],
             body,
         )
-            .into_response()
+            .into_response();
+        if matches!(self.kind, ProblemKind::TooLarge | ProblemKind::Timeout) {
+            // The rest of the body stays unread, so the connection cannot carry another request.
+            let close = HeaderValue::from_static("close");
+            response.headers_mut().insert(header::CONNECTION, close);
+        }
+        response
     }
 }

@@ -8,6 +8,7 @@
 //! - [`Unit`]: one of the units a kind is read and written in
 //! - [`parse`]: a text to a [`Reading`] in SI
 //! - [`UnitChoice`]: the units that a request chose for its bare numbers
+//! - [`number_text`]: a number as people read it
 //! - [`nearest`]: the known name that a misspelt one resembles
 
 mod defaults;
@@ -20,6 +21,7 @@ mod parse;
 mod scale;
 #[cfg(test)]
 mod tests;
+mod text;
 mod units;
 mod words;
 
@@ -28,4 +30,5 @@ pub use error::QuantityError;
 pub use kind::Kind;
 pub use nearest::nearest;
 pub use parse::{Reading, parse};
+pub use text::number_text;
 pub use units::Unit;

@@ -264,6 +264,15 @@ fn all_faults_are_told_at_once() {
 }
 
 #[test]
+fn a_flood_of_faults_is_cut_short() {
+    let members: Vec<_> = (0..5000).map(|i| format!("\"x{i}\":1")).collect();
+    let reply = post_bytes(format!("{{{}}}", members.join(",")));
+    let faults = reply.faults();
+    assert_eq!(faults.len(), 101);
+    assert_eq!(faults[100], ("#".to_owned(), "too-many-faults".to_owned()));
+}
+
+#[test]
 fn a_bare_number_taken_as_kelvin_is_hinted_at() {
     let reply = post(&json!({
         "geometry": "sphere", "diameter": 0.2, "surface_temperature": 85, "ambient_temperature": 20,

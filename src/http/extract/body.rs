@@ -1,6 +1,6 @@
 //! A JSON body: its media type, its size and the time it takes to arrive.
 
-use axum::body::Body;
+use axum::body::{Body, HttpBody};
 use axum::extract::{FromRequest, Request};
 use axum::http::{HeaderMap, header};
 use bytes::Bytes;
@@ -19,13 +19,15 @@ impl FromRequest<Service> for JsonBody {
     async fn from_request(request: Request, service: &Service) -> Result<Self, Problem> {
         check_media_type(request.headers())?;
         let limit = service.limits.body_bytes;
-        let body = Limited::new(request.into_body(), limit);
+        let body = request.into_body();
+        // An announced length is refused before the body is sent.
+        if body.size_hint().lower() > limit as u64 {
+            return Err(too_large(limit));
+        }
+        let body = Limited::new(body, limit);
         match timeout(service.limits.body_time, collect(body)).await {
             Ok(Ok(bytes)) => Ok(JsonBody(bytes)),
-            Ok(Err(error)) if error.is::<LengthLimitError>() => Err(Problem::new(
-                ProblemKind::TooLarge,
-                format!("the body is larger than {limit} bytes; send less at a time"),
-            )),
+            Ok(Err(error)) if error.is::<LengthLimitError>() => Err(too_large(limit)),
             Ok(Err(_)) => Err(Problem::new(
                 ProblemKind::Malformed,
                 "the body broke off before its end",
@@ -39,6 +41,13 @@ impl FromRequest<Service> for JsonBody {
             )),
         }
     }
+}
+
+fn too_large(limit: usize) -> Problem {
+    Problem::new(
+        ProblemKind::TooLarge,
+        format!("the body is larger than {limit} bytes; send less at a time"),
+    )
 }
 
 async fn collect(body: Limited<Body>) -> Result<Bytes, Box<dyn std::error::Error + Send + Sync>> {

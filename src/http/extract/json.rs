@@ -3,7 +3,7 @@
 use std::borrow::Cow;
 use std::fmt;
 
-use serde::de::{Deserializer, MapAccess, Visitor};
+use serde::de::{Deserializer, IgnoredAny, MapAccess, Visitor};
 use serde_json::error::Category;
 use serde_json::value::RawValue;
 
@@ -18,17 +18,13 @@ use super::{ANSWER_KINDS, FIELD_KINDS, FilmInput, UNIT_MEMBERS, keep_choice};
 /// # Errors
 /// The bytes are no JSON, or JSON that is no object.
 pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
-    let members = read_members(bytes).map_err(|error| match error.classify() {
-        Category::Data => Problem::invalid(vec![Fault::under(
-            &[],
-            "wrong-type",
-            "the body is not a JSON object; send one case as an object of named fields",
-        )]),
-        _ => Problem::new(ProblemKind::Malformed, format!("not JSON: {error}")),
-    })?;
+    let members = read_members(bytes).map_err(|error| refusal(bytes, &error))?;
     let mut input = FilmInput::default();
     let mut chosen: [Option<&RawValue>; 2] = [None; 2];
     for (name, raw) in &members {
+        if input.is_hopeless() {
+            break;
+        }
         if let Some(place) = UNIT_MEMBERS.iter().position(|member| member == name) {
             if chosen[place].replace(raw).is_some() {
                 input.faults.push(duplicate_field(name));
@@ -48,6 +44,24 @@ pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
         &mut input.faults,
     );
     Ok(input)
+}
+
+/// The refusal of bytes that are no JSON, or JSON of another form.
+fn refusal(bytes: &[u8], error: &serde_json::Error) -> Problem {
+    let malformed = |error: &serde_json::Error| {
+        Problem::new(ProblemKind::Malformed, format!("not JSON: {error}"))
+    };
+    if error.classify() != Category::Data {
+        return malformed(error);
+    }
+    match serde_json::from_slice::<IgnoredAny>(bytes) {
+        Err(error) => malformed(&error),
+        Ok(_) => Problem::invalid(vec![Fault::under(
+            &[],
+            "wrong-type",
+            "the body is not a JSON object; send one case as an object of named fields",
+        )]),
+    }
 }
 
 type Members<'a> = Vec<(Cow<'a, str>, &'a RawValue)>;

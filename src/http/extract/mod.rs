@@ -27,6 +27,27 @@ pub struct FilmInput<'a> {
     pub answer_units: UnitChoice,
     /// What is wrong so far.
     pub faults: Vec<Fault>,
+    /// Whether the rest was left unread because so much is wrong.
+    pub unread: bool,
+}
+
+/// With more faults than this the rest of a request is not read.
+const MOST_FAULTS: usize = 100;
+
+impl FilmInput<'_> {
+    /// Whether the faults are so many that the rest need not be read; says so among them.
+    fn is_hopeless(&mut self) -> bool {
+        if self.faults.len() < MOST_FAULTS {
+            return false;
+        }
+        self.faults.push(Fault::under(
+            &[],
+            "too-many-faults",
+            format!("the request has {MOST_FAULTS} faults and more; the rest was not read"),
+        ));
+        self.unread = true;
+        true
+    }
 }
 
 /// Members of a request beside the fields of its case.

@@ -53,6 +53,9 @@ impl Query {
         let mut options = QueryOptions::default();
         let mut seen = [false; OPTIONS.len()];
         for (name, value) in self.pairs() {
+            if input.is_hopeless() {
+                break;
+            }
             let place = OPTIONS.iter().position(|option| *option == name);
             if place.is_some_and(|place| std::mem::replace(&mut seen[place], true)) {
                 input.faults.push(duplicate_field(&name));

@@ -16,7 +16,7 @@ use crate::http::problem::{Problem, ProblemBody};
 use crate::http::reply::{Body, internal, json, tagged, text};
 use crate::http::schema::{FilmAnswer, FilmRequest, field_schema, parameter};
 use crate::http::service::Service;
-use crate::quantity::{Kind, Unit, UnitChoice};
+use crate::quantity::{Kind, Unit, UnitChoice, number_text};
 
 /// Answer one case.
 #[utoipa::path(
@@ -172,7 +172,7 @@ fn read_unit(options: &QueryOptions, faults: &mut Vec<Fault>) -> Option<Unit> {
 fn cell_text(cell: Cell, unit: Unit) -> String {
     match cell {
         Cell::Number(value) => {
-            value.map_or_else(String::new, |value| unit.from_si(value).to_string())
+            value.map_or_else(String::new, |value| number_text(unit.from_si(value)))
         }
         Cell::Word(word) => word.to_owned(),
         Cell::Notes(notes) => notes
@@ -189,6 +189,9 @@ fn solve(
     service: Service,
     wanted: Wanted,
 ) -> Result<(Case, Answer), Problem> {
+    if input.unread {
+        return Err(Problem::invalid(std::mem::take(&mut input.faults)));
+    }
     let case = match Case::read(&input.entries, &input.units, service.fluids) {
         Ok(case) if input.faults.is_empty() => case,
         Ok(_) => return Err(Problem::invalid(std::mem::take(&mut input.faults))),

@@ -2,6 +2,7 @@
 
 use std::collections::BTreeMap;
 
+use axum::extract::rejection::PathRejection;
 use axum::extract::{Path, State};
 use axum::http::HeaderMap;
 use axum::response::Response;
@@ -218,10 +219,12 @@ impl IntoParams for StateQuery {
 pub async fn read_fluid_state(
     State(service): State<Service>,
     _accepts: AcceptsJson,
-    Path(id): Path<String>,
+    id: Result<Path<String>, PathRejection>,
     query: Query,
     headers: HeaderMap,
 ) -> Result<Response, Problem> {
+    // An id that is not UTF-8 names no fluid.
+    let id = id.map(|Path(id)| id).unwrap_or_default();
     let Some(fluid) = service.fluids.find(&id).map(|id| service.fluids.get(id)) else {
         return Err(unknown_fluid(&id, service));
     };
