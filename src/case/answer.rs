@@ -32,6 +32,19 @@ pub struct Heat {
     pub flux: f64,
 }
 
+/// What a draught comes to.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct DraughtResult {
+    /// Richardson number, Grashof over the square of Reynolds, on the body's own length.
+    pub richardson: f64,
+    /// Coefficient of the draught alone.
+    pub forced_coefficient: f64,
+    /// Coefficient of free convection and draught together.
+    pub combined_coefficient: f64,
+    /// Whether the two oppose each other and nearly cancel.
+    pub cancels: bool,
+}
+
 /// What was found for a case, flat and in SI.
 #[derive(Clone, Copy, Debug, PartialEq)]
 pub struct Answer {
@@ -63,6 +76,14 @@ pub struct Answer {
     pub total: Heat,
     /// Coefficient of radiation on the difference to the surroundings.
     pub radiative_coefficient: Option<f64>,
+    /// The draught, where there is one.
+    pub draught: Option<DraughtResult>,
+    /// Conductivity of a still fluid that would carry the same heat across a gap.
+    pub effective_conductivity: Option<f64>,
+    /// Resistance of a plane gap by convection and, where counted, radiation.
+    pub thermal_resistance: Option<f64>,
+    /// Spacing at which a stack of channels loses most heat.
+    pub best_spacing: Option<f64>,
     /// Method.
     pub method: MethodId,
     /// How the case lies to its ranges.
@@ -73,7 +94,7 @@ pub struct Answer {
     pub low: Option<f64>,
     /// Largest.
     pub high: Option<f64>,
-    /// The chosen method over the body's usual one, less one.
+    /// The chosen method over the one that is chosen just across a range's edge, less one; 0 away from edges.
     pub method_step: f64,
     /// Notes.
     pub notes: Notes,
@@ -205,6 +226,18 @@ columns! {
         "radiative heat flux over the difference between surface and surroundings", "10.1", |a| Cell::Number(a.radiative_coefficient);
     HeatPerHour = "heat_per_hour", Optional(Kind::Energy),
         "total heat in one hour", "14800000.0", |a| Cell::Number(a.total.flow.map(|flow| flow * 3600.0));
+    Richardson = "richardson", Optional(Kind::Number),
+        "with a draught: Grashof number over the square of the Reynolds number, on the body's own length", "4.2", |a| Cell::Number(a.draught.map(|draught| draught.richardson));
+    ForcedCoefficient = "forced_coefficient", Optional(Kind::Coefficient),
+        "with a draught: its coefficient alone", "6.1", |a| Cell::Number(a.draught.map(|draught| draught.forced_coefficient));
+    CombinedCoefficient = "combined_coefficient", Optional(Kind::Coefficient),
+        "with a draught: the coefficient of both together, which the heat flows use", "8.3", |a| Cell::Number(a.draught.map(|draught| draught.combined_coefficient));
+    EffectiveConductivity = "effective_conductivity", Optional(Kind::Conductivity),
+        "of a gap: the conductivity of a still fluid that would carry the same heat, radiation not counted", "0.071", |a| Cell::Number(a.effective_conductivity);
+    ThermalResistance = "thermal_resistance", Optional(Kind::Resistance),
+        "of a plane gap: temperature difference over heat flux, radiation included when emissivities are given", "0.18", |a| Cell::Number(a.thermal_resistance);
+    BestSpacing = "best_spacing", Optional(Kind::Length),
+        "of a channel with one wall temperature: the spacing at which a stack of them loses most heat", "0.0075", |a| Cell::Number(a.best_spacing);
     Method = "method", ColumnType::Method,
         "the method that was used", "\"horizontal-cylinder-churchill-chu\"", |a| Cell::Word(a.method.as_str());
     Range = "range_status", Choice(RangeStatus::TEXTS),

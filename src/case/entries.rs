@@ -19,10 +19,19 @@ pub enum Given<'a> {
 }
 
 /// The raw values of one case.
-#[derive(Clone, Debug, Default)]
+#[derive(Clone, Debug)]
 pub struct Entries<'a> {
     values: [Option<Given<'a>>; Field::COUNT],
     seen: u64,
+}
+
+impl Default for Entries<'_> {
+    fn default() -> Self {
+        Entries {
+            values: [const { None }; Field::COUNT],
+            seen: 0,
+        }
+    }
 }
 
 impl<'a> Entries<'a> {

@@ -1,9 +1,14 @@
 //! A case's fields in SI: what was given, and nothing derived from it.
 
 use crate::fluids::{FluidId, Fluids};
-use crate::geometry::{Extrapolate, Facing, Field, FieldValue, Geometry, Limits};
+use crate::geometry::{
+    DraughtDirection, Extrapolate, Facing, Field, FieldValue, Geometry, HeatedFrom, HeatedWalls,
+    Limits,
+};
 use crate::methods::MethodId;
-use crate::quantity::{Kind, UnitChoice, nearest, number_text, parse};
+use crate::quantity::{
+    Kind, UnitChoice, looks_nominal, nearest, nominal_diameter, number_text, parse,
+};
 
 use super::entries::{Entries, Given, shown};
 use super::fault::Fault;
@@ -19,6 +24,14 @@ pub struct Fields {
     pub geometry: Option<Geometry>,
     /// The side that touches the fluid.
     pub facing: Option<Facing>,
+    /// The hot side of a level layer.
+    pub heated_from: Option<HeatedFrom>,
+    /// The heated walls of a channel.
+    pub heated_walls: Option<HeatedWalls>,
+    /// How a draught meets the fluid's own motion.
+    pub draught_direction: Option<DraughtDirection>,
+    /// Whether a diameter came as an inch size that is also a nominal pipe size.
+    pub nominal_size: bool,
     /// The fluid.
     pub fluid: Option<FluidId>,
     /// The method asked for, none for the automatic choice.
@@ -36,6 +49,10 @@ impl Default for Fields {
             bare: 0,
             geometry: None,
             facing: None,
+            heated_from: None,
+            heated_walls: None,
+            draught_direction: None,
+            nominal_size: false,
             fluid: None,
             method: None,
             extrapolate: None,
@@ -80,7 +97,10 @@ impl Fields {
     ) -> Result<(), Fault> {
         match field.entry().value {
             FieldValue::Quantity(kind, limits) => {
-                let (value, bare) = read_quantity(field, kind, given, units)?;
+                let (value, bare) = match self.read_nominal(field, given)? {
+                    Some(diameter) => (diameter, false),
+                    None => read_quantity(field, kind, given, units)?,
+                };
                 check_limits(field, kind, limits, value)?;
                 self.numbers[field as usize] = value;
                 self.read |= bit(field);
@@ -93,6 +113,11 @@ impl Fields {
                 match field {
                     Field::Geometry => self.geometry = Geometry::from_text(text),
                     Field::Facing => self.facing = Facing::from_text(text),
+                    Field::HeatedFrom => self.heated_from = HeatedFrom::from_text(text),
+                    Field::HeatedWalls => self.heated_walls = HeatedWalls::from_text(text),
+                    Field::DraughtDirection => {
+                        self.draught_direction = DraughtDirection::from_text(text);
+                    }
                     Field::Extrapolate => self.extrapolate = Extrapolate::from_text(text),
                     _ => {}
                 }
@@ -127,9 +152,36 @@ impl Fields {
         Ok(())
     }
 
+    /// The outside diameter of a nominal size; marks inch sizes that look like one.
+    fn read_nominal(&mut self, field: Field, given: &Given) -> Result<Option<f64>, Fault> {
+        const DIAMETERS: [Field; 3] = [Field::Diameter, Field::InnerDiameter, Field::OuterDiameter];
+        let Given::Text(text) = given else {
+            return Ok(None);
+        };
+        if !DIAMETERS.contains(&field) {
+            return Ok(None);
+        }
+        self.nominal_size |= looks_nominal(text);
+        nominal_diameter(text).map_err(|detail| {
+            Fault::at(
+                field,
+                "unknown-value",
+                format!("{}: {detail}", field.name()),
+            )
+        })
+    }
+
     /// Whether the caller gave this field, well or badly.
     pub fn is_given(&self, field: Field) -> bool {
         self.given & bit(field) != 0
+    }
+
+    /// The fields that the caller gave, in the order of the list.
+    pub fn given(&self) -> impl Iterator<Item = Field> {
+        Field::ALL
+            .iter()
+            .copied()
+            .filter(|&field| self.is_given(field))
     }
 
     /// The value of a quantity field, in SI, if it was given and could be read.

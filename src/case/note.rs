@@ -29,6 +29,16 @@ choice! {
         MethodStep = "method-step",
         /// The layer is neither laminar nor turbulent.
         Transition = "transition",
+        /// The gap's fluid conducts and hardly moves.
+        PureConduction = "pure-conduction",
+        /// The draught is not small against free convection.
+        DraughtMatters = "draught-matters",
+        /// The draught decides the loss.
+        DraughtGoverns = "draught-governs",
+        /// A wall or neighbour is closer than the layer is thick.
+        Confined = "confined",
+        /// An inch size looks like a nominal pipe size.
+        NominalSize = "nominal-size",
         /// The layer is thick against the cylinder's diameter.
         ThinCylinder = "thin-cylinder",
         /// The ends are surfaces of their own.
@@ -55,6 +65,8 @@ choice! {
         AboveFlashPoint = "above-flash-point",
         /// The ambient temperature looks like degrees Celsius taken as kelvin.
         BareNumberAsKelvin = "bare-number-as-kelvin",
+        /// The gas's density away from the table's pressure follows the ideal rule.
+        IdealGasFallback = "ideal-gas-fallback",
         /// The film is at the edge of the fluid's table.
         TableEdge = "table-edge",
         /// Surface and ambient have one temperature.
@@ -72,7 +84,10 @@ impl NoteCode {
             | NoteCode::ShapeOutsideRange
             | NoteCode::MethodStep
             | NoteCode::MethodsDisagree => Some(Field::Method),
-            NoteCode::ThinCylinder => Some(Field::Diameter),
+            NoteCode::ThinCylinder | NoteCode::NominalSize => Some(Field::Diameter),
+            NoteCode::DraughtMatters | NoteCode::DraughtGoverns => Some(Field::DraughtSpeed),
+            NoteCode::Confined => Some(Field::Clearance),
+            NoteCode::IdealGasFallback => Some(Field::Pressure),
             NoteCode::RadiationNotCounted | NoteCode::LowEmissivityReading => {
                 Some(Field::Emissivity)
             }
@@ -86,7 +101,7 @@ impl NoteCode {
             NoteCode::StrongPropertyVariation | NoteCode::DensityMaximum | NoteCode::TableEdge => {
                 Some(Field::Fluid)
             }
-            NoteCode::Transition | NoteCode::EndsNotCounted => None,
+            NoteCode::Transition | NoteCode::EndsNotCounted | NoteCode::PureConduction => None,
         }
     }
 }

@@ -2,7 +2,7 @@
 
 use crate::case::{Case, Fault, Surface};
 use crate::fluids::{Fluids, StateError};
-use crate::geometry::Field;
+use crate::geometry::{Field, Space};
 use crate::methods::{Groups, MethodId, Side};
 
 /// Why a case has no answer; flat, told in words at the edge.
@@ -19,11 +19,13 @@ pub enum Failure {
     },
     /// The case is too far out of range.
     Range {
-        /// The method asked for, or the body's usual one.
+        /// The method asked for, or the nearest of the automatic choice.
         method: MethodId,
         /// What it would be entered with.
         groups: Groups,
     },
+    /// No method of the body serves the case with properties that are known.
+    Unchosen,
     /// No surface temperature within the fluid's table gives the heat.
     Unsolved {
         /// Lowest surface temperature tried, K.
@@ -42,7 +44,9 @@ impl From<StateError> for Failure {
 impl Failure {
     /// The failure of a case as a fault of its request.
     pub fn fault(&self, case: &Case, fluids: &Fluids) -> Fault {
+        let closed = case.geometry.entry().space == Space::Closed;
         let surface_field = match case.surface {
+            Surface::Temperature(_) if closed => Field::HotTemperature,
             Surface::Temperature(_) => Field::SurfaceTemperature,
             Surface::HeatFlux(_) => Field::HeatFlux,
         };
@@ -91,6 +95,11 @@ impl Failure {
                     ),
                 )
             }
+            Failure::Unchosen => Fault::at(
+                Field::Method,
+                "outside-method-range",
+                "no method of this body can be entered here; force one of /v1/methods",
+            ),
             Failure::Unsolved { minimum, maximum } => Fault::at(
                 surface_field,
                 "no-solution",

@@ -51,7 +51,9 @@ fn span(case: &Case, fluid: &Fluid) -> (f64, f64) {
 /// Heat flux that leaves a surface at a temperature, W/m2.
 fn heat_flux(case: &Case, fluid: &Fluid, surface: f64) -> Result<f64, Failure> {
     let layer = Layer::new(case, fluid, surface)?;
-    let (_, coefficient) = layer.choose(Extrapolate::Any)?.result(case);
+    let (_, free) = layer.choose(Extrapolate::Any)?.result(case);
+    let draught = layer.draught(free)?;
+    let coefficient = draught.map_or(free, |draught| draught.combined_coefficient);
     let radiative = case.emissivity.map_or(0.0, |emissivity| {
         radiation::coefficient(emissivity, surface, case.surroundings_temperature)
             * (surface - case.surroundings_temperature)

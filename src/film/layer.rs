@@ -1,10 +1,11 @@
 //! The layer of fluid next to a surface of known temperature, and the methods that serve it.
 
-use crate::case::Case;
+use crate::case::{Case, DraughtResult};
 use crate::fluids::{Fluid, State, StateError};
-use crate::geometry::{Extrapolate, Facing};
-use crate::methods::{Groups, MethodId, RangeStatus, ReferenceTemperature, Side, Verdict};
+use crate::geometry::{Extrapolate, Facing, Geometry};
+use crate::methods::{Groups, MethodId, RangeStatus, ReferenceTemperature, Side, Verdict, choose};
 
+use super::draught::combine;
 use super::failure::Failure;
 
 /// A surface temperature and what it makes of the fluid.
@@ -16,6 +17,8 @@ pub(super) struct Layer<'a> {
     film: State,
     /// Which way the layer pulls.
     pub side: Side,
+    /// Tilt as the methods mean it, degrees: a gap whose warm fluid sinks is one upside down.
+    tilt: f64,
 }
 
 /// A method entered with a layer's groups.
@@ -33,7 +36,7 @@ impl Entered {
         let nusselt = (self.id.method().nusselt)(&self.groups);
         (
             nusselt,
-            nusselt * self.state.conductivity / case.size.characteristic_length,
+            nusselt * self.state.conductivity / case.size.conduction_length,
         )
     }
 
@@ -62,7 +65,10 @@ impl<'a> Layer<'a> {
             Some(facing) if rises == (facing == Facing::Up) => Side::Unstable,
             Some(_) => Side::Stable,
         };
+        let tilt = case.size.shape.tilt;
+        let turned = case.geometry == Geometry::TiltedLayer && !rises;
         Ok(Layer {
+            tilt: if turned { 180.0 - tilt } else { tilt },
             case,
             fluid,
             surface,
@@ -101,9 +107,8 @@ impl<'a> Layer<'a> {
                 * case.size.characteristic_length.powi(3)
                 / (viscosity * state.diffusivity()),
             prandtl: state.prandtl(),
-            tilt: case.size.tilt,
-            slenderness: case.size.slenderness,
-            length_ratio: case.size.length_ratio,
+            tilt: self.tilt,
+            ..case.size.shape
         };
         let verdict = method.verdict(&groups);
         Ok(Entered {
@@ -114,7 +119,7 @@ impl<'a> Layer<'a> {
         })
     }
 
-    /// The method asked for, or the automatic choice: the body's usual method within and, where that is allowed, near its range; else the first other within; else the first other near.
+    /// The method asked for, or the automatic choice.
     pub fn choose(&self, extrapolate: Extrapolate) -> Result<Entered, Failure> {
         if let Some(id) = self.case.method {
             if !self.methods().contains(&id) {
@@ -126,35 +131,42 @@ impl<'a> Layer<'a> {
             let entered = self.enter(id)?;
             return self.allow(entered, extrapolate);
         }
-        let usual = self.usual()?;
-        if usual.is_within()
-            || usual.verdict.status == RangeStatus::Near && usual.is_allowed(extrapolate)
-        {
-            return Ok(usual);
-        }
-        let others = || {
-            self.methods()[1..]
-                .iter()
-                .filter_map(|&id| self.enter(id).ok())
-        };
-        let within = others().find(Entered::is_within);
-        let near = || others().find(|other| other.verdict.status == RangeStatus::Near);
-        let best = within.or_else(near).unwrap_or(usual);
-        self.allow(
-            if best.is_allowed(extrapolate) {
-                best
-            } else {
-                usual
-            },
-            extrapolate,
-        )
+        // The registry's tests prove that every body, heating and side has an automatic method.
+        let entered =
+            choose(self.automatic(), |entered| entered.verdict).ok_or(Failure::Unchosen)?;
+        self.allow(entered, extrapolate)
     }
 
-    /// The body's usual method for this layer.
-    pub fn usual(&self) -> Result<Entered, Failure> {
-        // The registry's tests prove that every body, heating and side has a method.
-        let id = self.methods()[0];
-        Ok(self.enter(id)?)
+    /// The methods of the automatic choice whose properties are known.
+    fn automatic(&self) -> impl Iterator<Item = Entered> {
+        self.methods()
+            .iter()
+            .filter(|id| id.method().automatic)
+            .filter_map(|&id| self.enter(id).ok())
+    }
+
+    /// The method that the automatic choice would take just across the edge of a range, if that is near.
+    pub fn neighbour(&self, chosen: MethodId) -> Option<Entered> {
+        self.automatic().find(|entered| {
+            let verdict = entered.verdict;
+            entered.id != chosen && !verdict.usable && verdict.status == RangeStatus::Near
+        })
+    }
+
+    /// What the case's draught makes of a free coefficient.
+    pub fn draught(&self, free: f64) -> Result<Option<DraughtResult>, StateError> {
+        let Some(draught) = self.case.draught else {
+            return Ok(None);
+        };
+        combine(
+            self.case,
+            draught,
+            self.fluid,
+            &self.film,
+            self.surface,
+            free,
+        )
+        .map(Some)
     }
 
     /// Smallest and largest coefficient of a chosen method and all others within range.

@@ -1,8 +1,10 @@
 //! The film answer: convection by a chosen method, radiation beside it, and what to know about it.
 
 mod basis;
+mod draught;
 mod failure;
 mod flux;
+mod gap;
 mod layer;
 mod note_text;
 mod notes;
@@ -10,7 +12,7 @@ mod radiation;
 
 use crate::case::{Answer, Case, Column, Heat, Notes, Regime, Surface, Wanted};
 use crate::fluids::{Fluid, Fluids};
-use crate::geometry::Geometry;
+use crate::geometry::{Geometry, Space};
 use crate::methods::{MethodId, RangeStatus, Side};
 
 use layer::{Entered, Layer};
@@ -79,8 +81,10 @@ fn answer(case: &Case, fluid: &Fluid, wanted: Wanted) -> Outcome {
     let layer = Layer::new(case, fluid, surface)?;
     let entered = layer.choose(case.extrapolate)?;
     let (nusselt, coefficient) = entered.result(case);
+    let draught = layer.draught(coefficient)?;
     let difference = surface - case.ambient_temperature;
-    let convective = heat(case, coefficient * difference);
+    let carrying = draught.map_or(coefficient, |draught| draught.combined_coefficient);
+    let convective = heat(case, carrying * difference);
     let radiative_coefficient = case.emissivity.map(|emissivity| {
         radiation::coefficient(emissivity, surface, case.surroundings_temperature)
     });
@@ -90,10 +94,14 @@ fn answer(case: &Case, fluid: &Fluid, wanted: Wanted) -> Outcome {
             coefficient * (surface - case.surroundings_temperature),
         )
     });
-    let regime = regime(case, layer.side, &entered);
+    let regime = regime(case, layer.side, &entered, nusselt);
     let spread = wanted
         .any(&[Column::Low, Column::High, Column::Notes])
-        .then(|| layer.spread(entered.id, coefficient));
+        .then(|| match draught {
+            Some(draught) if draught.cancels => (0.0, draught.forced_coefficient.max(coefficient)),
+            _ => layer.spread(entered.id, coefficient),
+        });
+    let gap = gap::figures(case, &entered, nusselt, coefficient, radiative_coefficient);
     let mut answer = Answer {
         heat_transfer_coefficient: coefficient,
         nusselt,
@@ -112,6 +120,10 @@ fn answer(case: &Case, fluid: &Fluid, wanted: Wanted) -> Outcome {
             convective.flux + radiative.map_or(0.0, |radiative| radiative.flux),
         ),
         radiative_coefficient,
+        draught,
+        effective_conductivity: gap.effective_conductivity,
+        thermal_resistance: gap.thermal_resistance,
+        best_spacing: gap.best_spacing,
         method: entered.id,
         range_status: entered.verdict.status,
         scatter: entered
@@ -144,7 +156,10 @@ fn heat(case: &Case, flux: f64) -> Heat {
 fn surface_temperature_max(case: &Case, difference: f64) -> Option<f64> {
     let rises_along = matches!(
         case.geometry,
-        Geometry::VerticalPlate | Geometry::InclinedPlate | Geometry::VerticalCylinder
+        Geometry::VerticalPlate
+            | Geometry::InclinedPlate
+            | Geometry::VerticalCylinder
+            | Geometry::InclinedCylinder
     );
     match case.surface {
         Surface::HeatFlux(_) if rises_along => {
@@ -154,33 +169,49 @@ fn surface_temperature_max(case: &Case, difference: f64) -> Option<f64> {
     }
 }
 
-/// How far the automatic choice is from the body's usual method, where it had to leave it.
+/// How far the automatic choice is from the method that takes over just across the edge of a range.
 fn method_step(case: &Case, layer: &Layer, entered: &Entered, coefficient: f64) -> f64 {
-    if case.method.is_some() || layer.methods()[0] == entered.id {
+    if case.method.is_some() {
         return 0.0;
     }
-    layer
-        .usual()
-        .map_or(0.0, |usual| coefficient / usual.result(case).1 - 1.0)
+    layer.neighbour(entered.id).map_or(0.0, |neighbour| {
+        coefficient / neighbour.result(case).1 - 1.0
+    })
 }
 
 /// What moves in a layer, by the bounds that the methods' sources use.
-fn regime(case: &Case, side: Side, entered: &Entered) -> Regime {
-    let rayleigh = entered.groups.rayleigh;
-    let grashof = rayleigh / entered.groups.prandtl;
+fn regime(case: &Case, side: Side, entered: &Entered, nusselt: f64) -> Regime {
+    let groups = &entered.groups;
+    let rayleigh = groups.rayleigh;
+    let grashof = rayleigh / groups.prandtl;
     let (value, (laminar_to, turbulent_from)) = match case.geometry {
-        Geometry::VerticalPlate | Geometry::VerticalCylinder | Geometry::InclinedPlate => {
-            (grashof, notes::UPRIGHT_TRANSITION)
-        }
+        Geometry::VerticalPlate
+        | Geometry::VerticalCylinder
+        | Geometry::InclinedPlate
+        | Geometry::InclinedCylinder => (grashof, notes::UPRIGHT_TRANSITION),
+        // On the height of the channel, as a single wall.
+        Geometry::ParallelPlates => (grashof * groups.aspect.powi(3), notes::UPRIGHT_TRANSITION),
         // Lloyd and Moran 1974; a layer that clings to its plate stays laminar.
         Geometry::HorizontalPlate if side == Side::Unstable => (rayleigh, (8e6, 1e7)),
         Geometry::HorizontalPlate => (rayleigh, (f64::INFINITY, f64::INFINITY)),
         // Morgan 1975 ends the laminar band at 1e7, Churchill and Chu 1975 and McAdams 1954 at 1e9.
         Geometry::HorizontalCylinder => (rayleigh, (1e7, 1e9)),
         // By analogy with the cylinder; Churchill 1983 gives his laminar form to 1e11.
-        Geometry::Sphere => (rayleigh, (1e9, 1e11)),
+        Geometry::Sphere
+        | Geometry::Block
+        | Geometry::UprightShortCylinder
+        | Geometry::LyingShortCylinder => (rayleigh, (1e9, 1e11)),
+        // Cells become unsteady and then turbulent in these decades (common practice).
+        Geometry::HorizontalLayer | Geometry::TiltedLayer => (rayleigh, (5e4, 1e6)),
+        Geometry::VerticalCavity | Geometry::ConcentricCylinders | Geometry::ConcentricSpheres => {
+            (rayleigh, (1e6, 1e7))
+        }
     };
-    if rayleigh < 1.0 {
+    let still = match case.geometry.entry().space {
+        Space::Closed => nusselt <= 1.0,
+        Space::Open | Space::Channel => rayleigh < 1.0,
+    };
+    if still {
         Regime::Conduction
     } else if value < laminar_to {
         Regime::Laminar

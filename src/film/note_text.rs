@@ -2,9 +2,11 @@
 
 use crate::case::{Answer, Case, NoteCode, Severity};
 use crate::fluids::Fluids;
-use crate::geometry::Field;
+use crate::geometry::{Field, Space};
 use crate::methods::{Groups, Quantity, curvature_factor};
 use crate::quantity::{Kind, Unit};
+
+use super::notes::layer_thickness;
 
 /// A note as a caller reads it.
 #[derive(Clone, Debug, PartialEq)]
@@ -26,11 +28,16 @@ const GUARDED_FROM: f64 = 333.15;
 
 /// Writes a note of an answer.
 pub fn note(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> Note {
+    let closed = case.geometry.entry().space == Space::Closed;
     Note {
         code,
         severity: severity(code, answer),
         text: text(code, case, answer, fluids),
-        field: code.field(),
+        field: code.field().map(|field| match field {
+            Field::SurfaceTemperature if closed => Field::HotTemperature,
+            Field::Emissivity if closed => Field::EmissivityHot,
+            field => field,
+        }),
     }
 }
 
@@ -54,6 +61,9 @@ fn severity(code: NoteCode, answer: &Answer) -> Severity {
         | NoteCode::MayFreeze
         | NoteCode::AboveFlashPoint
         | NoteCode::BareNumberAsKelvin => Severity::Warning,
+        NoteCode::DraughtMatters if answer.draught.is_some_and(|draught| draught.cancels) => {
+            Severity::Warning
+        }
         NoteCode::RayleighBelowRange
         | NoteCode::MethodStep
         | NoteCode::Transition
@@ -61,8 +71,14 @@ fn severity(code: NoteCode, answer: &Answer) -> Severity {
         | NoteCode::LowEmissivityReading
         | NoteCode::MethodsDisagree
         | NoteCode::StrongPropertyVariation
-        | NoteCode::MayCondense => Severity::Caution,
-        NoteCode::ThinCylinder
+        | NoteCode::MayCondense
+        | NoteCode::DraughtMatters
+        | NoteCode::DraughtGoverns
+        | NoteCode::Confined
+        | NoteCode::NominalSize => Severity::Caution,
+        NoteCode::PureConduction
+        | NoteCode::IdealGasFallback
+        | NoteCode::ThinCylinder
         | NoteCode::EndsNotCounted
         | NoteCode::TableEdge
         | NoteCode::EqualTemperatures => Severity::Info,
@@ -80,12 +96,27 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
             format!("{}: {}.", answer.method.as_str(), breaches(code, case, answer))
         }
         NoteCode::MethodStep => format!(
-            "The body's usual method is out of range here; this one gives {:+.1} % of it, so figures step where the choice changes.",
+            "Close by, the automatic choice changes to another method; this one gives {:+.1} % against it, and figures step by that much.",
             100.0 * answer.method_step
         ),
         NoteCode::Transition => format!(
             "Grashof number {:.1e}: the layer is changing from laminar to turbulent, and measurements scatter most here.",
             answer.rayleigh / answer.prandtl
+        ),
+        NoteCode::PureConduction => format!(
+            "The {} in the gap hardly moves: heat crosses it by conduction{}.",
+            fluid.name(),
+            if case.emissivity.is_some() { " and radiation" } else { "" }
+        ),
+        NoteCode::DraughtMatters | NoteCode::DraughtGoverns => draught_text(code, answer),
+        NoteCode::Confined => format!(
+            "The clearance is smaller than the layer, about {:.1e} m thick: a wall or neighbour hinders it, and the figures for an open body are only a guide.",
+            layer_thickness(answer)
+        ),
+        NoteCode::NominalSize => "The inch size is also a nominal pipe size, whose outside diameter is larger; write \"NPS 3\" or \"DN 80\" when that is meant.".to_owned(),
+        NoteCode::IdealGasFallback => format!(
+            "The table of {} is for another pressure; its density here follows the ideal rule, whose error /v1/fluids states.",
+            fluid.id()
         ),
         NoteCode::ThinCylinder => format!(
             "The layer bends around the cylinder, which raises its laminar part by about {:.0} % over a flat plate's.",
@@ -93,8 +124,9 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
         ),
         NoteCode::EndsNotCounted => format!(
             "The cylinder is only {:.1} diameters long; its end faces are surfaces of their own and are not in these figures.",
-            case.size.slenderness
+            case.size.shape.slenderness
         ),
+        NoteCode::RadiationNotCounted if case.geometry.entry().space == Space::Closed => "The emissivities are not given, so heat radiation across the gap is left out; between dull surfaces it is often more than half of the heat.".to_owned(),
         NoteCode::RadiationNotCounted => "No emissivity is given, so heat radiation is left out; on a dull hot surface it is often more than half of the loss.".to_owned(),
         NoteCode::LowEmissivityReading => "On a shiny surface an infrared thermometer at its usual setting reads far too low; measure with contact, or on dull tape or paint.".to_owned(),
         NoteCode::MethodsDisagree => format!(
@@ -144,6 +176,27 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
     }
 }
 
+fn draught_text(code: NoteCode, answer: &Answer) -> String {
+    let Some(draught) = answer.draught else {
+        return String::new();
+    };
+    if draught.cancels {
+        return format!(
+            "The draught opposes free convection and nearly cancels it (forced {:.3}, free {:.3} W/(m2 K)): no single value is safe; low and high span from nothing to the larger part.",
+            draught.forced_coefficient, answer.heat_transfer_coefficient
+        );
+    }
+    let weight = if code == NoteCode::DraughtGoverns {
+        "decides the loss"
+    } else {
+        "is not small against free convection"
+    };
+    format!(
+        "Richardson number {:.2e}: the draught {weight}; the flows use the combined coefficient, {:.3} W/(m2 K).",
+        draught.richardson, draught.combined_coefficient
+    )
+}
+
 fn burn_text(answer: &Answer) -> String {
     let hottest = hottest(answer);
     let contact = if hottest >= GUARDED_FROM {
@@ -171,9 +224,7 @@ fn groups(case: &Case, answer: &Answer) -> Groups {
     Groups {
         rayleigh: answer.rayleigh,
         prandtl: answer.prandtl,
-        tilt: case.size.tilt,
-        slenderness: case.size.slenderness,
-        length_ratio: case.size.length_ratio,
+        ..case.size.shape
     }
 }
 
@@ -182,8 +233,8 @@ fn breaches(code: NoteCode, case: &Case, answer: &Answer) -> String {
     let groups = groups(case, answer);
     let concerned = |quantity: Quantity| match code {
         NoteCode::PrandtlOutsideRange => quantity == Quantity::Prandtl,
-        NoteCode::ShapeOutsideRange => matches!(quantity, Quantity::Tilt | Quantity::Curvature),
-        _ => matches!(quantity, Quantity::Rayleigh | Quantity::RayleighAlong),
+        NoteCode::ShapeOutsideRange => quantity.is_shape(),
+        _ => quantity.is_buoyancy(),
     };
     let told: Vec<_> = answer
         .method

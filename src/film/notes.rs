@@ -1,8 +1,8 @@
 //! Which notes an answer earns.
 
 use crate::case::{Answer, Case, NoteCode, Notes, Surface};
-use crate::fluids::{Fluid, Phase};
-use crate::geometry::Geometry;
+use crate::fluids::{Fluid, Phase, PressureRule};
+use crate::geometry::{Geometry, Space};
 use crate::methods::curvature_factor;
 
 use super::layer::Entered;
@@ -23,6 +23,14 @@ const DENSITY_MAXIMUM_SPAN: f64 = 6.0;
 const PLAUSIBLE_AMBIENT: std::ops::RangeInclusive<f64> = 220.0..=350.0;
 /// Contact for hours can burn from here, K: ISO 13732-1, 43 degrees Celsius (from memory).
 const BURNS_FROM: f64 = 316.15;
+/// A step between neighbouring methods smaller than this is not told.
+const STEP: f64 = 0.01;
+/// Below this Richardson number a draught is not small (common practice).
+const DRAUGHT_MATTERS: f64 = 10.0;
+/// Below this Richardson number a draught decides (common practice).
+const DRAUGHT_GOVERNS: f64 = 0.1;
+/// Pressures that differ by less than this share are one.
+const PRESSURE_TOLERANCE: f64 = 1e-3;
 /// Grashof numbers between which an upright layer is neither laminar nor turbulent.
 pub(super) const UPRIGHT_TRANSITION: (f64, f64) = (1e8, 3e10);
 
@@ -45,10 +53,13 @@ fn method_notes(case: &Case, entered: &Entered, answer: &Answer, notes: &mut Not
     notes.add_if(verdict.rayleigh_above, NoteCode::RayleighAboveRange);
     notes.add_if(verdict.prandtl_outside, NoteCode::PrandtlOutsideRange);
     notes.add_if(moves && verdict.shape_outside, NoteCode::ShapeOutsideRange);
-    notes.add_if(answer.method_step != 0.0, NoteCode::MethodStep);
+    notes.add_if(answer.method_step.abs() > STEP, NoteCode::MethodStep);
     let upright = matches!(
         case.geometry,
-        Geometry::VerticalPlate | Geometry::InclinedPlate | Geometry::VerticalCylinder
+        Geometry::VerticalPlate
+            | Geometry::InclinedPlate
+            | Geometry::VerticalCylinder
+            | Geometry::InclinedCylinder
     );
     let (laminar_to, turbulent_from) = UPRIGHT_TRANSITION;
     let grashof = answer.rayleigh / answer.prandtl;
@@ -59,20 +70,48 @@ fn method_notes(case: &Case, entered: &Entered, answer: &Answer, notes: &mut Not
     if let (Some(low), Some(high)) = (answer.low, answer.high) {
         notes.add_if(high > low * (1.0 + DISAGREEMENT), NoteCode::MethodsDisagree);
     }
-    if case.geometry == Geometry::VerticalCylinder {
+    if matches!(
+        case.geometry,
+        Geometry::VerticalCylinder | Geometry::InclinedCylinder
+    ) {
         let bends = moves && curvature_factor(&entered.groups) > THIN_CYLINDER;
         notes.add_if(bends, NoteCode::ThinCylinder);
     }
     let cylinder = matches!(
         case.geometry,
-        Geometry::VerticalCylinder | Geometry::HorizontalCylinder
+        Geometry::VerticalCylinder | Geometry::HorizontalCylinder | Geometry::InclinedCylinder
     );
-    let slenderness = case.size.slenderness;
+    let slenderness = case.size.shape.slenderness;
     notes.add_if(
         cylinder && slenderness > 0.0 && slenderness < SHORT_CYLINDER,
         NoteCode::EndsNotCounted,
     );
     notes.add_if(!moves, NoteCode::EqualTemperatures);
+    let closed = case.geometry.entry().space == Space::Closed;
+    notes.add_if(
+        moves && closed && answer.nusselt <= 1.0,
+        NoteCode::PureConduction,
+    );
+    if let Some(draught) = answer.draught {
+        let richardson = draught.richardson;
+        notes.add_if(richardson < DRAUGHT_GOVERNS, NoteCode::DraughtGoverns);
+        let matters = (DRAUGHT_GOVERNS..DRAUGHT_MATTERS).contains(&richardson);
+        notes.add_if(matters || draught.cancels, NoteCode::DraughtMatters);
+    }
+    let thickness = layer_thickness(answer);
+    notes.add_if(
+        moves
+            && case
+                .clearance
+                .is_some_and(|clearance| clearance < thickness),
+        NoteCode::Confined,
+    );
+    notes.add_if(case.nominal_size, NoteCode::NominalSize);
+}
+
+/// Thickness of a layer whose temperature falls as a parabola, m: twice conductivity over coefficient.
+pub(super) fn layer_thickness(answer: &Answer) -> f64 {
+    2.0 * answer.state.conductivity / answer.heat_transfer_coefficient
 }
 
 fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
@@ -81,6 +120,10 @@ fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
         fluid.near_edge(answer.film_temperature),
         NoteCode::TableEdge,
     );
+    if let PressureRule::IdealGas { reference, .. } = *fluid.pressure_rule() {
+        let away = (case.pressure / reference - 1.0).abs() > PRESSURE_TOLERANCE;
+        notes.add_if(away, NoteCode::IdealGasFallback);
+    }
     let varies = match fluid.phase() {
         Phase::Gas => surface.max(ambient) > STRONG_VARIATION * surface.min(ambient),
         Phase::Liquid => match (
@@ -120,9 +163,10 @@ fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
 }
 
 fn surface_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
+    let space = case.geometry.entry().space;
     let gas = fluid.phase() == Phase::Gas;
     notes.add_if(
-        gas && case.emissivity.is_none(),
+        gas && case.emissivity.is_none() && space != Space::Channel,
         NoteCode::RadiationNotCounted,
     );
     let measured = matches!(case.surface, Surface::Temperature(_));
@@ -134,7 +178,7 @@ fn surface_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes)
         .surface_temperature_max
         .unwrap_or(answer.surface_temperature);
     notes.add_if(
-        hottest.max(answer.surface_temperature) >= BURNS_FROM,
+        space != Space::Closed && hottest.max(answer.surface_temperature) >= BURNS_FROM,
         NoteCode::BurnHazard,
     );
     notes.add_if(

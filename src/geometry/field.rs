@@ -15,6 +15,38 @@ choice! {
 }
 
 choice! {
+    /// The side from which a level layer is heated.
+    HeatedFrom {
+        /// The lower plate is the hot one.
+        Below = "below",
+        /// The upper plate is the hot one.
+        Above = "above",
+    }
+}
+
+choice! {
+    /// Which walls of a channel are heated.
+    HeatedWalls {
+        /// Both walls.
+        Both = "both",
+        /// One wall, the other insulated.
+        One = "one",
+    }
+}
+
+choice! {
+    /// How a draught meets the rising or sinking fluid.
+    DraughtDirection {
+        /// It blows the same way.
+        Assisting = "assisting",
+        /// It blows the opposite way.
+        Opposing = "opposing",
+        /// It blows across.
+        Across = "across",
+    }
+}
+
+choice! {
     /// What to do when a method is asked for outside its range.
     Extrapolate {
         /// Refuse.
@@ -123,11 +155,22 @@ fields! {
     Area = "area", FieldValue::Quantity(Kind::Area, Limits::from(1e-12, 1e8)),
         "area of the face that is asked about", "\"4.2 m2\"";
     Perimeter = "perimeter", LENGTH, "length of the edge around a horizontal plate", "\"8.6 m\"";
+    Gap = "gap", LENGTH, "distance between the two surfaces of a closed space", "\"16 mm\"";
+    Spacing = "spacing", LENGTH, "distance between the walls of an open channel", "\"8 mm\"";
+    InnerDiameter = "inner_diameter", LENGTH, "diameter of the inner of two concentric surfaces", "\"50 mm\"";
+    OuterDiameter = "outer_diameter", LENGTH, "diameter of the outer of two concentric surfaces", "\"100 mm\"";
     TiltFromVertical = "tilt_from_vertical",
         FieldValue::Quantity(Kind::Angle, Limits::from(0.0, 90.0)),
         "angle between the surface and the vertical", "30";
+    TiltFromHorizontal = "tilt_from_horizontal",
+        FieldValue::Quantity(Kind::Angle, Limits::from(0.0, 180.0)),
+        "angle between a layer and the horizontal: 0 is heated from below, 90 upright, 180 heated from above", "45";
     Facing = "facing", FieldValue::Choice(Facing::TEXTS),
         "the side of a plate that touches the fluid", "\"up\"";
+    HeatedFrom = "heated_from", FieldValue::Choice(HeatedFrom::TEXTS),
+        "the side of a level layer that is hot", "\"below\"";
+    HeatedWalls = "heated_walls", FieldValue::Choice(HeatedWalls::TEXTS),
+        "the walls of a channel that are heated; the other of one is insulated", "\"both\"";
     SurfaceTemperature = "surface_temperature", TEMPERATURE,
         "temperature of the surface", "\"160 degC\"";
     HeatFlux = "heat_flux", FieldValue::Quantity(Kind::HeatFlux, Limits::from(-1e8, 1e8)),
@@ -138,6 +181,10 @@ fields! {
         "\"350 W\"";
     AmbientTemperature = "ambient_temperature", TEMPERATURE,
         "temperature of the fluid away from the surface", "\"20 degC\"";
+    HotTemperature = "hot_temperature", TEMPERATURE,
+        "temperature of the hotter surface of a closed space; of concentric bodies the inner one is taken as the hotter", "\"20 degC\"";
+    ColdTemperature = "cold_temperature", TEMPERATURE,
+        "temperature of the colder surface of a closed space", "\"5 degC\"";
     Fluid = "fluid", FieldValue::Fluid, "the fluid around the body, one of the ids of /v1/fluids", "\"air\"";
     Pressure = "pressure", FieldValue::Quantity(Kind::Pressure, Limits::above(0.0, 1e9)),
         "absolute pressure of the fluid, 101325 Pa when neither it nor altitude is given", "\"1.2 bar\"";
@@ -145,8 +192,18 @@ fields! {
         "height above sea level, turned into a pressure by the standard atmosphere; stands instead of pressure", "\"1500 m\"";
     Emissivity = "emissivity", FieldValue::Quantity(Kind::Number, Limits::from(0.0, 1.0)),
         "emissivity of the surface; radiation is counted when it is given", "0.9";
+    EmissivityHot = "emissivity_hot", FieldValue::Quantity(Kind::Number, Limits::from(0.0, 1.0)),
+        "emissivity of the hotter surface of a closed space; radiation is counted when both are given", "0.84";
+    EmissivityCold = "emissivity_cold", FieldValue::Quantity(Kind::Number, Limits::from(0.0, 1.0)),
+        "emissivity of the colder surface of a closed space", "0.84";
     SurroundingsTemperature = "surroundings_temperature", TEMPERATURE,
         "temperature of the walls that the surface sees, the ambient temperature when not given", "\"18 degC\"";
+    DraughtSpeed = "draught_speed", FieldValue::Quantity(Kind::Speed, Limits::from(0.0, 300.0)),
+        "speed of the fluid that blows past the body", "\"0.5 m/s\"";
+    DraughtDirection = "draught_direction", FieldValue::Choice(DraughtDirection::TEXTS),
+        "how the draught meets the rising or sinking fluid, across when not given", "\"across\"";
+    Clearance = "clearance", LENGTH,
+        "distance to the nearest wall or neighbour", "\"50 mm\"";
     Gravity = "gravity", FieldValue::Quantity(Kind::Acceleration, Limits::above(0.0, 1e4)),
         "acceleration of gravity, 9.80665 m/s2 when not given", "9.80665";
     Method = "method", FieldValue::Method, "one of the ids of /v1/methods, or auto", "\"auto\"";

@@ -5,7 +5,10 @@ mod entries;
 mod field;
 
 pub(crate) use choice::choice;
-pub use field::{Extrapolate, Facing, Field, FieldEntry, FieldValue, Limits};
+pub use field::{
+    DraughtDirection, Extrapolate, Facing, Field, FieldEntry, FieldValue, HeatedFrom, HeatedWalls,
+    Limits,
+};
 
 choice! {
     /// A body whose surface loses or gains heat.
@@ -20,8 +23,105 @@ choice! {
         HorizontalCylinder = "horizontal-cylinder",
         /// The side of an upright pipe, tank or rod.
         VerticalCylinder = "vertical-cylinder",
+        /// A pipe, rod or cable between upright and lying.
+        InclinedCylinder = "inclined-cylinder",
         /// A ball.
         Sphere = "sphere",
+        /// A box, cabinet or block as one body.
+        Block = "block",
+        /// A short upright cylinder with its ends, as one body.
+        UprightShortCylinder = "upright-short-cylinder",
+        /// A short lying cylinder with its ends, as one body.
+        LyingShortCylinder = "lying-short-cylinder",
+        /// A level gap between two plates.
+        HorizontalLayer = "horizontal-layer",
+        /// A leaning gap between two plates.
+        TiltedLayer = "tilted-layer",
+        /// An upright gap between two walls.
+        VerticalCavity = "vertical-cavity",
+        /// The gap between two lying concentric cylinders.
+        ConcentricCylinders = "concentric-cylinders",
+        /// The gap between two concentric spheres.
+        ConcentricSpheres = "concentric-spheres",
+        /// An open channel between two upright plates.
+        ParallelPlates = "parallel-plates",
+    }
+}
+
+/// How a body meets its fluid.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub enum Space {
+    /// A surface in open fluid.
+    Open,
+    /// A closed gap between a hotter and a colder surface.
+    Closed,
+    /// A gap open below and above.
+    Channel,
+}
+
+/// The fields beside a body's size that a space takes.
+#[derive(Clone, Copy, Debug)]
+pub struct SpaceFields {
+    /// Fields that must be given.
+    pub required: &'static [Field],
+    /// Fields of which exactly one must be given, where there are any.
+    pub one_of: &'static [Field],
+    /// Fields that may be given.
+    pub optional: &'static [Field],
+}
+
+impl Space {
+    /// The fields beside a body's size.
+    pub fn fields(self) -> SpaceFields {
+        const HEATING: &[Field] = &[Field::SurfaceTemperature, Field::HeatFlux, Field::HeatFlow];
+        match self {
+            Space::Open => SpaceFields {
+                required: &[Field::AmbientTemperature],
+                one_of: HEATING,
+                optional: &[
+                    Field::Fluid,
+                    Field::Pressure,
+                    Field::Altitude,
+                    Field::Emissivity,
+                    Field::SurroundingsTemperature,
+                    Field::DraughtSpeed,
+                    Field::DraughtDirection,
+                    Field::Clearance,
+                    Field::Gravity,
+                    Field::Method,
+                    Field::Extrapolate,
+                    Field::Id,
+                ],
+            },
+            Space::Closed => SpaceFields {
+                required: &[Field::HotTemperature, Field::ColdTemperature],
+                one_of: &[],
+                optional: &[
+                    Field::Fluid,
+                    Field::Pressure,
+                    Field::Altitude,
+                    Field::EmissivityHot,
+                    Field::EmissivityCold,
+                    Field::Gravity,
+                    Field::Method,
+                    Field::Extrapolate,
+                    Field::Id,
+                ],
+            },
+            Space::Channel => SpaceFields {
+                required: &[Field::AmbientTemperature],
+                one_of: HEATING,
+                optional: &[
+                    Field::Fluid,
+                    Field::Pressure,
+                    Field::Altitude,
+                    Field::Gravity,
+                    Field::Method,
+                    Field::Extrapolate,
+                    Field::Id,
+                ],
+            },
+        }
     }
 }
 
@@ -39,6 +139,8 @@ pub struct SizeForm {
 pub struct GeometryEntry {
     /// Plain words.
     pub name: &'static str,
+    /// How it meets its fluid.
+    pub space: Space,
     /// The length in its Nusselt and Rayleigh numbers.
     pub characteristic_length: &'static str,
     /// What a figure per length is per, where the body has one.
@@ -59,8 +161,15 @@ pub const DIMENSIONS: &[Field] = &[
     Field::Diameter,
     Field::Area,
     Field::Perimeter,
+    Field::Gap,
+    Field::Spacing,
+    Field::InnerDiameter,
+    Field::OuterDiameter,
     Field::TiltFromVertical,
+    Field::TiltFromHorizontal,
     Field::Facing,
+    Field::HeatedFrom,
+    Field::HeatedWalls,
 ];
 
 impl Geometry {
@@ -72,7 +181,17 @@ impl Geometry {
             Geometry::HorizontalPlate => &entries::HORIZONTAL_PLATE,
             Geometry::HorizontalCylinder => &entries::HORIZONTAL_CYLINDER,
             Geometry::VerticalCylinder => &entries::VERTICAL_CYLINDER,
+            Geometry::InclinedCylinder => &entries::INCLINED_CYLINDER,
             Geometry::Sphere => &entries::SPHERE,
+            Geometry::Block => &entries::BLOCK,
+            Geometry::UprightShortCylinder => &entries::UPRIGHT_SHORT_CYLINDER,
+            Geometry::LyingShortCylinder => &entries::LYING_SHORT_CYLINDER,
+            Geometry::HorizontalLayer => &entries::HORIZONTAL_LAYER,
+            Geometry::TiltedLayer => &entries::TILTED_LAYER,
+            Geometry::VerticalCavity => &entries::VERTICAL_CAVITY,
+            Geometry::ConcentricCylinders => &entries::CONCENTRIC_CYLINDERS,
+            Geometry::ConcentricSpheres => &entries::CONCENTRIC_SPHERES,
+            Geometry::ParallelPlates => &entries::PARALLEL_PLATES,
         }
     }
 

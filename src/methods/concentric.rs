@@ -30,7 +30,7 @@ pub static CYLINDERS: Method = Method {
     remark: "The lower Prandtl end is for gases and above.",
     example: Example {
         groups: Groups::new(1e5, 0.7),
-        nusselt: EXAMPLE,
+        nusselt: 5.61709,
         figures: 6,
         from: COMPUTED,
     },
@@ -54,7 +54,7 @@ pub static SPHERES: Method = Method {
     remark: "The lower Prandtl end is for gases and above.",
     example: Example {
         groups: Groups::new(1e3, 0.7),
-        nusselt: EXAMPLE,
+        nusselt: 3.4053,
         figures: 6,
         from: COMPUTED,
     },

@@ -94,8 +94,8 @@ whole_body!(
     Block,
     block,
     CUBE,
-    EXAMPLE,
-    EXAMPLE,
+    103.801,
+    19.3800,
     "G = 2^(1/8) [(0.625 L^(4/3) W + H (L + W)^(4/3))/(L W + H W + L H)^(7/6)]^(3/4), L the longer horizontal side; Nu_0 = (3.192 + 1.868 x^0.76)/(1 + 1.189 x)^(1/2), x = H/(L W)^(1/2)"
 );
 
@@ -105,8 +105,8 @@ whole_body!(
     UprightShortCylinder,
     upright_cylinder,
     Groups::new(1e9, 0.7).with_slenderness(1.0),
-    EXAMPLE,
-    EXAMPLE,
+    102.889,
+    19.115,
     "G = 0.967 at H = D, else in the proportion of the block of equal base area and height; Nu_0 = (3.1915 + 2.7726 x^0.76)/(1 + 2 x)^(1/2), x = H/D"
 );
 
@@ -116,8 +116,8 @@ whole_body!(
     LyingShortCylinder,
     lying_cylinder,
     Groups::new(1e9, 0.7).with_slenderness(1.0),
-    EXAMPLE,
-    EXAMPLE,
+    112.117,
+    19.9577,
     "G = 1.019 at L = D, else in the proportion of the block of equal cross-section and length; Nu_0 = (3.1915 + 2.7726 x^0.76)/(1 + 2 x)^(1/2), x = L/D"
 );
 
@@ -162,8 +162,7 @@ fn upright_cylinder(g: &Groups) -> Shape {
     let (end, curved) = (0.25 * PI, PI * g.slenderness);
     Shape {
         conduction: cylinder_conduction(g.slenderness),
-        gravity: 0.967 * block_gravity(side, side, g.slenderness)
-            / block_gravity(side, side, 1.0),
+        gravity: 0.967 * block_gravity(side, side, g.slenderness) / block_gravity(side, side, 1.0),
         turbulent: (end * turbulent_upward_constant(g.prandtl)
             + curved * turbulent_vertical_constant(g.prandtl))
             / (2.0 * end + curved),

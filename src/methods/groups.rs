@@ -58,7 +58,10 @@ impl Groups {
 
     /// The same with a height or length over the diameter.
     pub const fn with_slenderness(self, slenderness: f64) -> Self {
-        Groups { slenderness, ..self }
+        Groups {
+            slenderness,
+            ..self
+        }
     }
 
     /// The same with another Rayleigh number.

@@ -26,7 +26,7 @@ pub static RAITHBY_HOLLANDS: Method = Method {
     remark: "The larger heat flow of the lying cylinder with gravity across it and the upright one with gravity along it: the source's rule for inclined plates, carried over by analogy.",
     example: Example {
         groups: LEANING,
-        nusselt: EXAMPLE,
+        nusselt: 180.505,
         figures: 6,
         from: COMPUTED,
     },
@@ -62,7 +62,7 @@ pub static AL_ARABI_KHAMIS: Method = Method {
     remark: "Air. 25 to 90 % above the other methods at the two ends of the tilt. The Rayleigh range is from memory.",
     example: Example {
         groups: LEANING,
-        nusselt: EXAMPLE,
+        nusselt: 270.063,
         figures: 6,
         from: COMPUTED,
     },

@@ -7,6 +7,7 @@ mod choice;
 mod concentric;
 mod convex_body;
 mod entry;
+pub mod forced;
 mod groups;
 mod horizontal_cylinder;
 mod horizontal_layer;
@@ -174,7 +175,9 @@ fn listed(geometry: Geometry, heating: Heating, side: Side) -> Vec<MethodId> {
 /// Nusselt number of an isothermal body by the automatic choice.
 fn automatic_nusselt(geometry: Geometry, side: Side, groups: &Groups) -> f64 {
     let methods = MethodId::serving(geometry, Heating::Isothermal, side).iter();
-    let automatic = methods.map(|id| id.method()).filter(|method| method.automatic);
+    let automatic = methods
+        .map(|id| id.method())
+        .filter(|method| method.automatic);
     choose(automatic, |method| method.verdict(groups))
         .map_or(1.0, |method| (method.nusselt)(groups))
 }

@@ -50,6 +50,8 @@ kinds! {
     Coefficient = "coefficient",
     /// Thermal conductivity.
     Conductivity = "conductivity",
+    /// Thermal resistance of an area.
+    Resistance = "resistance",
     /// Energy, amount of heat.
     Energy = "energy",
     /// Mass.
@@ -125,6 +127,7 @@ mod tests {
                 ("heat_flow_per_length", "W/m"),
                 ("coefficient", "W/(m2 K)"),
                 ("conductivity", "W/(m K)"),
+                ("resistance", "m2 K/W"),
                 ("energy", "J"),
                 ("mass", "kg"),
                 ("time", "s"),

@@ -9,6 +9,7 @@
 //! - [`parse`]: a text to a [`Reading`] in SI
 //! - [`UnitChoice`]: the units that a request chose for its bare numbers
 //! - [`number_text`]: a number as people read it
+//! - [`nominal_diameter`], [`looks_nominal`]: nominal pipe sizes
 //! - [`nearest`]: the known name that a misspelt one resembles
 
 mod defaults;
@@ -16,6 +17,7 @@ mod error;
 mod expression;
 mod kind;
 mod nearest;
+mod nominal;
 mod number;
 mod parse;
 mod scale;
@@ -29,6 +31,7 @@ pub use defaults::{ChoiceFault, UnitChoice};
 pub use error::QuantityError;
 pub use kind::Kind;
 pub use nearest::nearest;
+pub use nominal::{looks_nominal, nominal_diameter};
 pub use parse::{Reading, parse};
 pub use text::number_text;
 pub use units::Unit;

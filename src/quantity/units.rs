@@ -40,6 +40,7 @@ const fn symbols(kind: Kind) -> &'static [&'static str] {
             "Btu in/(h ft2 degF)",
             "kcal/(h m K)",
         ],
+        Kind::Resistance => &["m2 K/W", "h ft2 degF/Btu"],
         Kind::Energy => &[
             "J", "kJ", "MJ", "GJ", "Wh", "kWh", "MWh", "Btu", "kBtu", "MMBtu", "therm", "kcal",
         ],

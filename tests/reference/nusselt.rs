@@ -1,24 +1,26 @@
 //! Evaluates the registry's formulas for programs that check them.
 //!
-//! Reads one JSON object a line, `{"method": id, "rayleigh": x, "prandtl": x, "tilt": degrees, "slenderness": x, "length_ratio": x}`
-//! (missing numbers are 0), and writes `{"nusselt": x}` for each. With `--list` it writes every id and ends.
+//! Reads one JSON object a line with a `method` and the members of `Groups` (missing numbers are 0), and writes `{"nusselt": x}` for each. With `--list` it writes every id and ends.
 
 use std::io::{self, BufRead, Write};
 
 use plumeline::methods::{Groups, MethodId};
 use serde::Deserialize;
 
-#[derive(Deserialize)]
+#[derive(Default, Deserialize)]
+#[serde(default)]
 struct Line {
     method: String,
     rayleigh: f64,
     prandtl: f64,
-    #[serde(default)]
     tilt: f64,
-    #[serde(default)]
     slenderness: f64,
-    #[serde(default)]
     length_ratio: f64,
+    aspect: f64,
+    block_length: f64,
+    block_width: f64,
+    block_height: f64,
+    heated_walls: f64,
 }
 
 fn main() -> io::Result<()> {
@@ -40,6 +42,11 @@ fn main() -> io::Result<()> {
             tilt: line.tilt,
             slenderness: line.slenderness,
             length_ratio: line.length_ratio,
+            aspect: line.aspect,
+            block_length: line.block_length,
+            block_width: line.block_width,
+            block_height: line.block_height,
+            heated_walls: line.heated_walls,
         };
         let nusselt = (id.method().nusselt)(&groups);
         writeln!(out, "{}", serde_json::json!({ "nusselt": nusselt }))?;

@@ -120,15 +120,30 @@ pub struct ExampleView {
     /// Prandtl number.
     #[schema(example = 0.7241)]
     prandtl: f64,
-    /// Angle from the vertical, degrees.
+    /// Angle of a plate or cylinder from the vertical, of a layer from the horizontal, degrees.
     #[schema(example = 0.0)]
     tilt: f64,
-    /// Height over diameter of an upright cylinder.
+    /// Height or length of a cylinder over its diameter.
     #[schema(example = 0.0)]
     slenderness: f64,
     /// Area over perimeter of an inclined plate, over its length.
     #[schema(example = 0.0)]
     length_ratio: f64,
+    /// Height of a layer, cavity or channel over its gap.
+    #[schema(example = 0.0)]
+    aspect: f64,
+    /// Longer horizontal side of a block over the root of its whole area.
+    #[schema(example = 0.0)]
+    block_length: f64,
+    /// Shorter horizontal side, likewise.
+    #[schema(example = 0.0)]
+    block_width: f64,
+    /// Height, likewise.
+    #[schema(example = 0.0)]
+    block_height: f64,
+    /// How many walls of a channel are heated.
+    #[schema(example = 0.0)]
+    heated_walls: f64,
     /// The Nusselt number.
     #[schema(example = 17.4)]
     nusselt: f64,
@@ -182,6 +197,11 @@ impl MethodView {
                 tilt: groups.tilt,
                 slenderness: groups.slenderness,
                 length_ratio: groups.length_ratio,
+                aspect: groups.aspect,
+                block_length: groups.block_length,
+                block_width: groups.block_width,
+                block_height: groups.block_height,
+                heated_walls: groups.heated_walls,
                 nusselt: example.nusselt,
                 from: example.from,
             },
