@@ -18,7 +18,7 @@ pub static CHURCHILL_CHU: Method = Method {
     ranges: &[Range::between(Quantity::Rayleigh, 1e-5, 1e12).with_limit_below()],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
-    remark: "17 to 18 % below the banded and blended methods at Ra 1 to 100, up to 16 % above the blend at 1e7 to 1e9. Tends to 0.36 as Ra tends to 0.",
+    remark: "17 to 20 % below the banded and blended methods at Ra 1 to 100, up to 16 % above the blend at 1e7 to 1e9. Tends to 0.36 as Ra tends to 0.",
     example: Example {
         groups: Groups::new(1.869e6, 0.7241),
         nusselt: 17.40,
