@@ -103,7 +103,7 @@ pub static RAITHBY_HOLLANDS_STABLE: Method = Method {
     ranges: &[Range::between(Quantity::Rayleigh, 1e3, 1e10).with_limit_below()],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
-    remark: "The constant 2.5 is carried as read; the original could not be consulted. Radziemska and Lewandowski lie -11 to +19 % from it, McAdams -26 to +107 % (Pr 0.7).",
+    remark: "The constant 2.5 is carried as read; the original could not be consulted. It lies -19 to +11 % from Radziemska and Lewandowski, from which McAdams differs more still (-26 to +107 % from this one, Pr 0.7).",
     example: Example {
         groups: Groups::new(1e7, 0.7),
         nusselt: 11.2526,
