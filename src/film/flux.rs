@@ -5,6 +5,7 @@ use roots::{SimpleConvergency, find_root_brent};
 use crate::case::Case;
 use crate::fluids::Fluid;
 use crate::geometry::Extrapolate;
+use crate::methods::ReferenceTemperature;
 
 use super::failure::Failure;
 use super::layer::Layer;
@@ -12,6 +13,10 @@ use super::radiation;
 
 /// Temperatures closer than this, and fluxes smaller than this, are one.
 const TOLERANCE: f64 = 1e-10;
+
+/// A flux missed by more than this share, and by more than [`SMALLEST`] W/m2, lies in the step between two methods or bands.
+const STEP: f64 = 1e-4;
+const SMALLEST: f64 = 1e-6;
 
 /// The share of the film's temperature span that is kept off its ends, where rounding could leave the table.
 const MARGIN: f64 = 1e-9;
@@ -30,17 +35,18 @@ pub(super) fn surface_temperature(case: &Case, fluid: &Fluid, flux: f64) -> Resu
     };
     find_root_brent(minimum, maximum, excess, &mut convergency)
         .ok()
-        .filter(|surface| surface.is_finite())
+        .filter(|&surface| excess(surface).abs() <= (STEP * flux.abs()).max(SMALLEST))
         .ok_or(Failure::Unsolved { minimum, maximum })
 }
 
-/// Surface temperatures whose film the fluid's table holds, on the ambient's side of the greatest density.
+/// Surface temperatures whose reference temperatures the fluid's table holds, on the ambient's side of the greatest density.
 fn span(case: &Case, fluid: &Fluid) -> (f64, f64) {
     let ambient = case.ambient_temperature;
     let (coldest, hottest) = fluid.temperatures_at(case.pressure);
     let margin = MARGIN * (hottest - coldest);
-    let lowest = (2.0 * (coldest + margin) - ambient).max(1.0);
-    let highest = 2.0 * (hottest - margin) - ambient;
+    let share = reference_share(case);
+    let lowest = (ambient + (coldest + margin - ambient) / share).max(1.0);
+    let highest = ambient + (hottest - margin - ambient) / share;
     match fluid.density_maximum() {
         Some(turn) if ambient < turn => (lowest, highest.min(turn)),
         Some(turn) => (lowest.max(turn), highest),
@@ -48,10 +54,30 @@ fn span(case: &Case, fluid: &Fluid) -> (f64, f64) {
     }
 }
 
+/// The largest share of the temperature difference at which properties are wanted.
+fn reference_share(case: &Case) -> f64 {
+    const FILM: f64 = 0.5;
+    match case.method.map(|id| id.method().reference) {
+        Some(ReferenceTemperature::Weighted {
+            properties,
+            expansion,
+        }) => properties.max(expansion).max(FILM),
+        _ => FILM,
+    }
+}
+
 /// Heat flux that leaves a surface at a temperature, W/m2.
 fn heat_flux(case: &Case, fluid: &Fluid, surface: f64) -> Result<f64, Failure> {
     let layer = Layer::new(case, fluid, surface)?;
-    let (_, free) = layer.choose(Extrapolate::Any)?.result(case);
+    let entered = layer
+        .choose(case.extrapolate)
+        .or_else(|_| layer.choose(Extrapolate::Any));
+    let free = match entered {
+        Ok(entered) => entered.result(case).1,
+        // On the side that the method is not for, nothing but radiation counts.
+        Err(Failure::Side { .. }) => 0.0,
+        Err(failure) => return Err(failure),
+    };
     let draught = layer.draught(free)?;
     let coefficient = draught.map_or(free, |draught| draught.combined_coefficient);
     let radiative = case.emissivity.map_or(0.0, |emissivity| {

@@ -149,7 +149,7 @@ pub struct Method {
     /// A worked figure.
     pub example: Example,
     /// Rayleigh numbers at which the formula changes from one band to the next.
-    pub edges: &'static [f64],
+    pub edges: &'static [fn(&Groups) -> f64],
     /// Nusselt number on the characteristic length.
     pub nusselt: fn(&Groups) -> f64,
 }
@@ -158,6 +158,14 @@ impl Method {
     /// Where a case lies to the method's ranges.
     pub fn verdict(&self, groups: &Groups) -> Verdict {
         Verdict::of(self.ranges, groups)
+    }
+
+    /// Whether the formula changes from one band to the next between two Rayleigh numbers.
+    pub fn changes_between(&self, groups: &Groups, next: &Groups) -> bool {
+        self.edges
+            .iter()
+            .map(|edge| edge(groups))
+            .any(|edge| groups.rayleigh <= edge && edge < next.rayleigh)
     }
 
     /// Whether the method is for this heating and side.

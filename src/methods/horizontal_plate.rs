@@ -55,7 +55,7 @@ pub static LLOYD_MORAN: Method = Method {
         figures: 4,
         from: "0.15 times 1000, by hand",
     },
-    edges: &[1e7],
+    edges: &[|_| 1e7],
     nusselt: |g| {
         if g.rayleigh <= 1e7 {
             0.54 * g.rayleigh.powf(0.25)
@@ -87,7 +87,7 @@ pub static GOLDSTEIN_SPARROW_JONES: Method = Method {
         figures: 3,
         from: "0.96 times 2, by hand",
     },
-    edges: &[200.0],
+    edges: &[|_| 200.0],
     nusselt: |g| {
         if g.rayleigh <= 200.0 {
             0.96 * g.rayleigh.powf(1.0 / 6.0)
@@ -107,7 +107,7 @@ pub static RAITHBY_HOLLANDS_STABLE: Method = Method {
     ranges: &[Range::between(Quantity::Rayleigh, 1e3, 1e10).answered_below()],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
-    remark: "The constant 2.5 is carried as read; the original could not be consulted. The methods for this side differ by -19 to +11 %.",
+    remark: "The constant 2.5 is carried as read; the original could not be consulted. It lies -19 to +11 % from Radziemska and Lewandowski, from which McAdams differs more still (-26 to +107 % from this one, Pr 0.7).",
     example: Example {
         groups: Groups::new(1e7, 0.7),
         nusselt: 11.2526,

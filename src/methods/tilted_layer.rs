@@ -102,7 +102,7 @@ pub static CATTON: Method = Method {
         figures: 6,
         from: COMPUTED,
     },
-    edges: &[1e6, 1e7, 2e7, 1e8, 1e9],
+    edges: &[|_| 1e6, |_| 1e7, |_| 2e7, |_| 1e8, |_| 1e9],
     nusselt: |g| {
         let level = automatic_nusselt(Geometry::HorizontalLayer, Side::Unstable, g);
         let upright = automatic_nusselt(Geometry::VerticalCavity, Side::Any, g);

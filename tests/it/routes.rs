@@ -336,10 +336,9 @@ fn media_types_and_sizes_are_checked() {
     let reply = call(none);
     assert_eq!(reply.status, StatusCode::UNSUPPORTED_MEDIA_TYPE);
     assert!(reply.text.contains("send application/json"));
-    assert_eq!(
-        post_bytes(" ".repeat(2 << 20)).status,
-        StatusCode::PAYLOAD_TOO_LARGE
-    );
+    let large = post_bytes(" ".repeat(2 << 20));
+    assert_eq!(large.status, StatusCode::PAYLOAD_TOO_LARGE);
+    assert_eq!(large.headers[header::CONNECTION], "close");
     let picture = Request::get("/v1/fluids").header(header::ACCEPT, "image/png");
     assert_eq!(
         call(picture.body(Body::empty()).unwrap()).status,

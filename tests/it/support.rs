@@ -88,55 +88,60 @@ fn chosen_units(value: &Value) -> UnitChoice {
     UnitChoice::parse_pairs(pairs, &kinds).unwrap_or_else(|faults| panic!("{faults:#?}"))
 }
 
-/// A case under construction, numbers in SI.
+/// A case under construction, bare numbers in SI.
 #[derive(Clone, Debug)]
-pub struct Draft {
-    words: Vec<(&'static str, &'static str)>,
-    numbers: Vec<(&'static str, f64)>,
-}
+pub struct Draft(Vec<(&'static str, Given<'static>)>);
 
 impl Draft {
     /// A body in a fluid.
     pub fn new(geometry: &'static str, fluid: &'static str) -> Self {
-        Draft {
-            words: vec![("geometry", geometry), ("fluid", fluid)],
-            numbers: Vec::new(),
-        }
+        Draft(Vec::new())
+            .word("geometry", geometry)
+            .word("fluid", fluid)
     }
 
     /// The same with a field that holds a word; the last one given counts.
-    pub fn word(mut self, name: &'static str, word: &'static str) -> Self {
-        self.words.retain(|(known, _)| *known != name);
-        self.words.push((name, word));
-        self
+    pub fn word(self, name: &'static str, word: &'static str) -> Self {
+        self.with(name, Given::Text(word.into()))
     }
 
     /// The same with a field that holds a number; the last one given counts.
-    pub fn number(mut self, name: &'static str, number: f64) -> Self {
-        self.numbers.retain(|(known, _)| *known != name);
-        self.numbers.push((name, number));
-        self
+    pub fn number(self, name: &'static str, number: f64) -> Self {
+        self.with(name, Given::Number(number))
+    }
+
+    /// The same with every number written as `text` has it; none leaves it as it is.
+    pub fn rewritten(&self, text: impl Fn(&str, f64) -> Option<String>) -> Self {
+        let rewrite = |(name, given): &(&'static str, Given<'static>)| match given {
+            Given::Number(number) => match text(name, *number) {
+                Some(text) => (*name, Given::Text(text.into())),
+                None => (*name, given.clone()),
+            },
+            _ => (*name, given.clone()),
+        };
+        Draft(self.0.iter().map(rewrite).collect())
     }
 
     /// The case.
     pub fn read(&self) -> Result<Case, Vec<Fault>> {
         let mut entries = Entries::default();
-        let words = self
-            .words
-            .iter()
-            .map(|&(name, word)| (name, Given::Text(word.into())));
-        let numbers = self
-            .numbers
-            .iter()
-            .map(|&(name, number)| (name, Given::Number(number)));
-        for (name, given) in words.chain(numbers) {
+        for (name, given) in &self.0 {
             entries
-                .put(name, Some(given), &[])
+                .put(name, Some(given.clone()), &[])
                 .expect("a field that is not given twice");
         }
         Case::read(&entries, &UnitChoice::default(), Fluids::built_in())
     }
+
+    fn with(mut self, name: &'static str, given: Given<'static>) -> Self {
+        self.0.retain(|(known, _)| *known != name);
+        self.0.push((name, given));
+        self
+    }
 }
+
+/// What to do outside ranges, the boldest last.
+pub const EXTRAPOLATE: [&str; 3] = ["none", "near", "any"];
 
 /// A body with one size, to be scaled.
 pub struct Body {

@@ -16,6 +16,7 @@ from dataclasses import dataclass
 import numpy
 from scipy.integrate import simpson
 
+import chebyshev
 import similarity
 
 NODES = 100
@@ -24,15 +25,8 @@ NODES = 100
 class Grid:
     """Chebyshev points on 0-edge, half of them within `scale`; derivatives and integral."""
 
-    def __init__(self, edge, scale):
-        angle = numpy.pi * numpy.arange(NODES + 1) / NODES
-        points = -numpy.cos(angle)
-        weights = (-1.0) ** numpy.arange(NODES + 1)
-        weights[[0, -1]] *= 0.5
-        gap = points[:, None] - points[None, :] + numpy.eye(NODES + 1)
-        derivative = weights[None, :] / weights[:, None] / gap
-        numpy.fill_diagonal(derivative, 0.0)
-        numpy.fill_diagonal(derivative, -derivative.sum(axis=1))
+    def __init__(self, edge, scale, nodes=NODES):
+        points, derivative = chebyshev.points_and_derivative(nodes)
         far = 1.0 + 2.0 * scale / edge
         self.eta = scale * (1.0 + points) / (far - points)
         self.first = derivative * ((far - points) ** 2 / (scale * (1.0 + far)))[:, None]
@@ -62,7 +56,7 @@ class State:
 
 def station(grid, family, prandtl, start, drive=1.0, rate=0.0, history=None):
     """Newton's method for one station, where x u_x is `rate` u + `history`."""
-    size = NODES + 1
+    size = len(grid.eta)
     zero = numpy.zeros(size)
     history = history or State(zero, zero, zero)
     entrainment, inertia = family.entrainment + rate, family.inertia + rate
@@ -116,11 +110,11 @@ def station(grid, family, prandtl, start, drive=1.0, rate=0.0, history=None):
     raise ArithmeticError(f"no convergence at Pr {prandtl}, drive {drive}")
 
 
-def starting_layer(family, prandtl, widening=1.0):
+def starting_layer(family, prandtl, widening=1.0, nodes=NODES):
     """Grid and state of a family, from `similarity` as first guess, solved again here."""
     layer = similarity.solve(family, prandtl)
     edge = widening * layer.edge
-    grid = Grid(edge, 0.5 * numpy.sqrt(edge / layer.wall_gradient))
+    grid = Grid(edge, 0.5 * numpy.sqrt(edge / layer.wall_gradient), nodes)
     profile = layer.profile(numpy.minimum(grid.eta, layer.edge))
     return grid, station(grid, family, prandtl, State(profile[0], profile[1], profile[3]))
 
@@ -134,6 +128,17 @@ def similarity_gradient(family, prandtl):
     return wall_gradient(*starting_layer(family, prandtl))
 
 
+def behind(state, before, per_step):
+    """x u_x as `rate` u + `history`, and a first guess, from the one or two stations behind.
+
+    `per_step` is x over the step.
+    """
+    if before is None:
+        return per_step, state.combined(-per_step, state, 0.0), state
+    history = state.combined(-2.0 * per_step, before, 0.5 * per_step)
+    return 1.5 * per_step, history, state.combined(2.0, before, -1.0)
+
+
 def march(body, prandtl, last, steps, widening=1.5):
     """Stations x and local -theta'(0) from the lowest point to `last`."""
     sphere = body == "sphere"
@@ -144,12 +149,7 @@ def march(body, prandtl, last, steps, widening=1.5):
     for x in stations[1:]:
         entrainment = 1.0 + x / numpy.tan(x) if sphere else 1.0
         family = similarity.Family(entrainment, 1.0, 0.0)
-        per_step = x / stations[1]
-        if before is None:
-            rate, history = per_step, state.combined(-per_step, state, 0.0)
-        else:
-            rate, history = 1.5 * per_step, state.combined(-2.0 * per_step, before, 0.5 * per_step)
-        guess = state if before is None else state.combined(2.0, before, -1.0)
+        rate, history, guess = behind(state, before, x / stations[1])
         drive = numpy.sin(x) / x
         state, before = station(grid, family, prandtl, guess, drive, rate, history), state
         gradients.append(wall_gradient(grid, state))

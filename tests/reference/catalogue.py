@@ -1,32 +1,18 @@
 """The method ids, typed a second time, with the span over which each is compared."""
 
-from collections.abc import Callable
-from dataclasses import dataclass
-
 import formulas
-from formulas import Groups
+from body_catalogue import BODY_METHODS
+from method import TABULATED, Method, product
 
+# 90 degrees is asked only of the tilt rule, where the level plate carries the heat flow: the
+# cosine of 90 degrees is 6e-17 in binary, and its fourth root alone is as large as 1e-4.
+TILTS = (0.0, 5.0, 15.0, 22.5, 30.0, 45.0, 60.0, 67.5, 75.0, 88.0, 89.9)
+SLENDERNESSES = (0.1, 0.3, 1.0, 3.0, 10.0, 30.0, 100.0)
+LENGTH_RATIOS = (0.05, 0.1, 0.2, 0.25, 0.5)
 
-@dataclass(frozen=True)
-class Method:
-    """A formula with the span of Ra and Pr over which it is compared.
-
-    `edges` are the Ra at which a banded formula changes; the edge belongs to the band below.
-    `relative_tolerance` is 1e-9 for closed formulas.
-    """
-
-    nusselt: Callable[[Groups], float]
-    rayleigh: tuple[float, float]
-    prandtl: tuple[float, float] = (0.01, 1e4)
-    edges: tuple[float, ...] = ()
-    tilts: bool = False
-    slendernesses: bool = False
-    length_ratios: bool = False
-    relative_tolerance: float = 1e-9
-
-
-# A surface average is tabulated on the Rust side, and integrated here.
-TABULATED = 1e-6
+TILTED = product(tilt=TILTS)
+TILTED_TO_LEVEL = product(tilt=(*TILTS, 90.0), length_ratio=LENGTH_RATIOS)
+SLENDER = product(slenderness=SLENDERNESSES)
 
 METHODS = {
     "vertical-plate-raithby-hollands": Method(
@@ -50,25 +36,23 @@ METHODS = {
     "inclined-plate-raithby-hollands-unstable": Method(
         lambda g: formulas.tilt_rule(g, formulas.horizontal_unstable),
         (0.1, 1e12),
-        tilts=True,
-        length_ratios=True,
+        shapes=TILTED_TO_LEVEL,
     ),
     "inclined-plate-raithby-hollands-stable": Method(
         lambda g: formulas.tilt_rule(g, formulas.horizontal_stable),
         (0.1, 1e12),
-        tilts=True,
-        length_ratios=True,
+        shapes=TILTED_TO_LEVEL,
     ),
     "inclined-plate-churchill-chu-laminar": Method(
         lambda g: formulas.plate_churchill_chu_laminar(g.rayleigh * g.cosine, g.prandtl),
         (0.1, 1e9),
-        tilts=True,
+        shapes=TILTED,
     ),
-    "inclined-plate-vliet-ross": Method(formulas.inclined_vliet_ross, (0.1, 1e12), tilts=True),
-    "inclined-plate-vliet": Method(formulas.inclined_vliet, (0.1, 1e12), tilts=True),
-    "inclined-plate-fujii-imura": Method(formulas.inclined_fujii_imura, (1e5, 1e11), tilts=True),
+    "inclined-plate-vliet-ross": Method(formulas.inclined_vliet_ross, (0.1, 1e12), shapes=TILTED),
+    "inclined-plate-vliet": Method(formulas.inclined_vliet, (0.1, 1e12), shapes=TILTED),
+    "inclined-plate-fujii-imura": Method(formulas.inclined_fujii_imura, (1e5, 1e11), shapes=TILTED),
     "inclined-plate-fujii-imura-unstable": Method(
-        formulas.inclined_fujii_imura_unstable, (1e5, 1e12), tilts=True
+        formulas.inclined_fujii_imura_unstable, (1e5, 1e12), shapes=TILTED
     ),
     "horizontal-plate-raithby-hollands-unstable": Method(formulas.horizontal_unstable, (1.0, 1e11)),
     "horizontal-plate-raithby-hollands-stable": Method(formulas.horizontal_stable, (1e3, 1e10)),
@@ -95,10 +79,10 @@ METHODS = {
     "horizontal-cylinder-kuehn-goldstein": Method(formulas.cylinder_kuehn_goldstein, (1e-10, 1e12)),
     "horizontal-cylinder-power-law": Method(formulas.cylinder_power_law, (1e4, 1e12), edges=(1e9,)),
     "vertical-cylinder-popiel": Method(
-        formulas.vertical_cylinder_popiel, (0.1, 1e12), prandtl=(0.01, 100.0), slendernesses=True
+        formulas.vertical_cylinder_popiel, (0.1, 1e12), prandtl=(0.01, 100.0), shapes=SLENDER
     ),
     "vertical-cylinder-lefevre-ede": Method(
-        formulas.vertical_cylinder_lefevre_ede, (1e4, 1e9), slendernesses=True
+        formulas.vertical_cylinder_lefevre_ede, (1e4, 1e9), shapes=SLENDER
     ),
     "vertical-cylinder-churchill-chu": Method(formulas.plate_churchill_chu, (0.1, 1e12)),
     # Churchill 1983, Heat Exchanger Design Handbook, 2.5.7.
@@ -111,3 +95,5 @@ METHODS = {
         formulas.sphere_raithby_hollands, (1.0, 1e13), relative_tolerance=TABULATED
     ),
 }
+
+METHODS |= BODY_METHODS

@@ -11,11 +11,6 @@ from catalogue import METHODS
 from formulas import Groups, turbulent_average
 from nusselt_command import NusseltCommand
 
-# 90 degrees is asked only of the tilt rule, where the level plate carries the heat flow: the
-# cosine of 90 degrees is 6e-17 in binary, and its fourth root alone is as large as 1e-4.
-TILTS = (0.0, 5.0, 15.0, 22.5, 30.0, 45.0, 60.0, 67.5, 75.0, 88.0, 89.9)
-SLENDERNESSES = (0.1, 0.3, 1.0, 3.0, 10.0, 30.0, 100.0)
-LENGTH_RATIOS = (0.05, 0.1, 0.2, 0.25, 0.5)
 PRANDTLS = (0.01, 0.03, 0.1, 0.3, 0.66, 0.71, 1.0, 2.0, 6.7, 13.0, 100.0, 2000.0, 1e4)
 
 # Surface averages of the turbulent coefficient of a horizontal cylinder as the catalogue
@@ -43,17 +38,11 @@ def rayleighs(method):
 
 def grid(method):
     low, high = method.prandtl
-    tilts = (0.0,)
-    if method.tilts:
-        tilts = TILTS + ((90.0,) if method.length_ratios else ())
+    prandtls = [prandtl for prandtl in PRANDTLS if low <= prandtl <= high]
     return [
-        Groups(*point)
-        for point in itertools.product(
-            rayleighs(method),
-            [prandtl for prandtl in PRANDTLS if low <= prandtl <= high],
-            tilts,
-            SLENDERNESSES if method.slendernesses else (0.0,),
-            LENGTH_RATIOS if method.length_ratios else (0.0,),
+        Groups(rayleigh, prandtl, **shape)
+        for rayleigh, prandtl, shape in itertools.product(
+            rayleighs(method), prandtls, method.shapes
         )
     ]
 

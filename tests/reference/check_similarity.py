@@ -10,6 +10,7 @@ import numpy
 
 import boundary_layer
 import similarity
+from checks import Checks
 from formulas import Groups
 from nusselt_command import NusseltCommand
 
@@ -39,29 +40,6 @@ SPARROW_GREGG = (
 # Mean Nu_D/Ra_D^(1/4) of laminar layers, as the catalogue lists them.
 CYLINDER_LIMITS = ((0.7, 0.407), (1.0, 0.422), (6.0, 0.475), (100.0, 0.506))
 SPHERE_LIMITS = ((0.7, 0.450), (1.0, 0.467), (6.0, 0.531), (100.0, 0.573))
-
-
-class Checks:
-    """Prints every finding and keeps those beyond their bound."""
-
-    def __init__(self):
-        self.count, self.failures = 0, 0
-
-    def within(self, what, found, bound):
-        """`found` is a deviation; nothing else than a number up to `bound` passes."""
-        self.count += 1
-        passed = abs(found) <= bound
-        self.failures += not passed
-        print(f"{'ok  ' if passed else 'FAIL'} {what}: {found:+.2e} (bound {bound:.2e})")
-
-    def largest(self, what, deviations, bound):
-        """The largest of (Pr, deviation) by size."""
-        prandtl, worst = max(deviations, key=lambda pair: _size(pair[1]))
-        self.within(f"{what}, worst at Pr {prandtl:.3g}", worst, bound)
-
-
-def _size(deviation):
-    return math.inf if math.isnan(deviation) else abs(deviation)
 
 
 def check_solvers(checks):
@@ -214,8 +192,7 @@ def main():
     check_uniform_flux(checks, command)
     check_top_edge(checks, command)
     check_round_bodies(checks, command)
-    print(f"{checks.count} checks, {checks.failures} failures")
-    return 1 if checks.failures else 0
+    return checks.finish()
 
 
 if __name__ == "__main__":

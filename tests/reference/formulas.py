@@ -20,13 +20,24 @@ from scipy.optimize import brentq
 
 @dataclass(frozen=True)
 class Groups:
-    """What a method is given; `tilt` in degrees from the vertical."""
+    """What a method is given.
+
+    `tilt` in degrees, from the vertical for plates and cylinders, from the horizontal for
+    layers; `slenderness` is length or height over diameter; `aspect` height over gap or over
+    spacing; the three sides of a block are over the root of its total area.
+    """
 
     rayleigh: float
     prandtl: float
     tilt: float = 0.0
     slenderness: float = 0.0
     length_ratio: float = 0.0
+    aspect: float = 0.0
+    diameter_ratio: float = 0.0
+    block_length: float = 0.0
+    block_width: float = 0.0
+    block_height: float = 0.0
+    heated_walls: int = 0
 
     @property
     def cosine(self) -> float:
@@ -285,19 +296,27 @@ def cylinder_power_law(g):
 # Vertical cylinder.
 
 
-def vertical_cylinder_popiel(g):
+def popiel_factor(curvature, prandtl):
     """Popiel, Wojtkowiak & Bober 2007, Exp. Thermal Fluid Sci. 32, 607-613: fit to Cebeci 1974.
 
-    The fit grows without bound as Ra tends to 0; plumeline holds it below Ra 100.
+    `curvature` is 32^(1/2) Gr_H^(-1/4) H/D.
     """
-    prandtl = g.prandtl
-    grashof = max(g.rayleigh, 100.0) / prandtl
-    curvature = math.sqrt(32.0) * grashof**-0.25 * g.slenderness
     factor = 0.0571322 + 0.20305 * prandtl**-0.43
     exponent = (
         0.9165 - 0.0043 * math.sqrt(prandtl) + 0.01333 * math.log(prandtl) + 0.0004809 / prandtl
     )
-    return plate_blend(g.rayleigh, g.rayleigh, prandtl, 1.0 + factor * curvature**exponent)
+    return 1.0 + factor * curvature**exponent
+
+
+def vertical_cylinder_popiel(g):
+    """The plate with Popiel's factor on its laminar part.
+
+    The factor grows without bound as Ra tends to 0; plumeline holds it below Ra 100.
+    """
+    grashof = max(g.rayleigh, 100.0) / g.prandtl
+    curvature = math.sqrt(32.0) * grashof**-0.25 * g.slenderness
+    factor = popiel_factor(curvature, g.prandtl)
+    return plate_blend(g.rayleigh, g.rayleigh, g.prandtl, factor)
 
 
 def vertical_cylinder_lefevre_ede(g):
