@@ -1,7 +1,7 @@
 //! A well-formed case.
 
 use crate::digest::sha256;
-use crate::fluids::{FluidId, Fluids, Phase};
+use crate::fluids::{Conditions, FluidId, Fluids, Phase};
 use crate::geometry::{Extrapolate, Facing, Field, Geometry};
 use crate::methods::{Heating, MethodId};
 use crate::quantity::UnitChoice;
@@ -41,8 +41,8 @@ pub struct Case {
     pub ambient_temperature: f64,
     /// The fluid.
     pub fluid: FluidId,
-    /// Its absolute pressure, Pa.
-    pub pressure: f64,
+    /// Its absolute pressure and its composition.
+    pub conditions: Conditions,
     /// Emissivity, where radiation is to be counted.
     pub emissivity: Option<f64>,
     /// Temperature of what the surface sees, K.
@@ -110,7 +110,7 @@ impl Case {
             surface: surface?,
             ambient_temperature,
             fluid,
-            pressure: pressure?,
+            conditions: Conditions::pure(pressure?),
             emissivity: fields.number(Field::Emissivity),
             surroundings_temperature: fields
                 .number(Field::SurroundingsTemperature)
@@ -158,7 +158,8 @@ impl Case {
             temperature,
             flux,
             Some(self.ambient_temperature),
-            Some(self.pressure),
+            Some(self.conditions.pressure),
+            Some(self.conditions.composition),
             self.emissivity,
             Some(self.surroundings_temperature),
             Some(self.gravity),

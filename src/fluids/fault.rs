@@ -1,8 +1,8 @@
-//! What is wrong with the text of a table.
+//! What is wrong with a table.
 
 use std::fmt;
 
-/// What is wrong with a table, and where.
+/// What is wrong with the text of a table, and where.
 #[derive(Clone, PartialEq, Eq, Debug)]
 pub struct TableFault {
     /// Counted from 1.
