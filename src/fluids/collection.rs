@@ -1,11 +1,14 @@
 //! Fluids by id.
 
+use std::path::Path;
 use std::sync::Arc;
 
 use crate::digest::sha256;
 
 use super::built_in::BUILT_IN;
+use super::fault::FolderFault;
 use super::fluid::Fluid;
+use super::folder;
 use super::humid_air::{self, HumidityError};
 use super::vapour;
 
@@ -13,7 +16,8 @@ use super::vapour;
 #[derive(Clone, Copy, PartialEq, Eq, Hash, Debug)]
 pub struct FluidId(usize);
 
-/// Fluids by id.
+/// The built-in fluids, and behind them those that an operator or a caller adds.
+#[derive(Clone)]
 pub struct Fluids {
     /// Never empty: every collection begins with the built-in ones.
     fluids: Vec<Arc<Fluid>>,
@@ -32,6 +36,22 @@ impl Fluids {
     /// The fluids that come with the service, read once.
     pub fn built_in() -> &'static Self {
         &BUILT_IN
+    }
+
+    /// The built-in fluids and those of every `*.csv` in a folder, by name of file.
+    ///
+    /// # Errors
+    /// All faults of all files, and ids that stand twice.
+    pub fn with_folder(folder: &Path) -> Result<Self, Vec<FolderFault>> {
+        folder::read(folder, BUILT_IN.fluids.clone()).map(Self::new)
+    }
+
+    /// These fluids and one more, cheap enough for a single request. The ids of these hold
+    /// there too; [`Self::digest`] stays, as the one more is part of the request.
+    pub fn with_own(&self, fluid: Fluid) -> (Self, FluidId) {
+        let mut extended = self.clone();
+        extended.fluids.push(Arc::new(fluid));
+        (extended, FluidId(self.fluids.len()))
     }
 
     /// The fluid taken where a request names none: air.

@@ -17,6 +17,52 @@ impl fmt::Display for TableFault {
     }
 }
 
+/// What is wrong with an operator's folder of tables, and where.
+#[derive(Clone, PartialEq, Eq, Debug)]
+pub struct FolderFault {
+    /// The file, or the folder itself.
+    pub file: String,
+    /// Counted from 1; none where the whole file is at fault.
+    pub line: Option<usize>,
+    /// What is wrong and what would do.
+    pub detail: String,
+}
+
+impl fmt::Display for FolderFault {
+    fn fmt(&self, out: &mut fmt::Formatter<'_>) -> fmt::Result {
+        let Self { file, line, detail } = self;
+        match line {
+            Some(line) => write!(out, "{file}:{line}: {detail}"),
+            None => write!(out, "{file}: {detail}"),
+        }
+    }
+}
+
+/// What is wrong with a caller's own table, and where.
+#[derive(Clone, PartialEq, Eq, Debug)]
+pub struct OwnFault {
+    /// The field of [`super::OwnTable`].
+    pub column: &'static str,
+    /// Counted from 0 as the caller wrote them; none where the whole column is at fault.
+    pub row: Option<usize>,
+    /// What is wrong and what would do.
+    pub detail: String,
+}
+
+impl fmt::Display for OwnFault {
+    fn fmt(&self, out: &mut fmt::Formatter<'_>) -> fmt::Result {
+        let Self {
+            column,
+            row,
+            detail,
+        } = self;
+        match row {
+            Some(row) => write!(out, "{column}, row {row}: {detail}"),
+            None => write!(out, "{column}: {detail}"),
+        }
+    }
+}
+
 /// Faults as they are found.
 #[derive(Default)]
 pub(super) struct Faults(Vec<TableFault>);

@@ -62,6 +62,7 @@ pub struct Fluid {
     pub(super) table: Table,
     pub(super) saturation: Option<Saturation>,
     pub(super) density_maximum: DensityMaximum,
+    pub(super) expansion_is_rough: bool,
 }
 
 impl Fluid {
@@ -143,6 +144,11 @@ impl Fluid {
     /// 1/K
     pub fn expansion_error_floor(&self) -> Option<f64> {
         self.description.expansion_error_floor
+    }
+
+    /// Whether the expansion comes from densities too rough for it; see [`super::OwnTable`].
+    pub fn expansion_is_rough(&self) -> bool {
+        self.expansion_is_rough
     }
 
     /// Whether a temperature lies within one row of either end of the table, or beyond it.

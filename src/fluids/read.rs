@@ -91,6 +91,7 @@ fn assemble(header: Header, body: &Body) -> Result<Fluid, Vec<TableFault>> {
         table,
         saturation: (!saturation.is_empty()).then(|| Saturation::new(grid.nodes(), saturation)),
         density_maximum,
+        expansion_is_rough: false,
         grid,
     })
 }

@@ -15,7 +15,7 @@ const SATURATION: &str = "saturation_pressure [Pa]";
 
 /// Far wider than any fluid's properties in SI, and narrow enough that no coefficient of an
 /// interpolant through them overflows.
-const PLAUSIBLE: RangeInclusive<f64> = 1e-12..=1e12;
+pub(super) const PLAUSIBLE: RangeInclusive<f64> = 1e-12..=1e12;
 
 /// The rows of a table in the order of its text.
 pub(super) struct Body {

@@ -1,7 +1,9 @@
 //! What every part of this module must answer, seen from outside.
 
+mod folders;
 mod humid_air;
 mod mixtures;
+mod own;
 mod reading;
 mod states;
 
