@@ -1,6 +1,6 @@
 //! Whether a case's temperatures and pressure lie where its fluid is known.
 
-use crate::fluids::{Fluid, StateError};
+use crate::fluids::{Conditions, Fluid, StateError};
 use crate::geometry::Field;
 
 use super::fault::Fault;
@@ -17,18 +17,18 @@ pub(super) fn check_temperatures(
     let ambient = case.ambient_temperature;
     let (checked, what) = match case.surface {
         Surface::Temperature(surface) => {
-            check_density_maximum(surface, ambient, fluid, faults);
+            check_density_maximum(surface, ambient, fluid, &case.conditions, faults);
             (0.5 * (surface + ambient), "the film temperature")
         }
         Surface::HeatFlux(_) => (ambient, "the ambient temperature"),
     };
-    let Err(error) = fluid.state(checked, case.pressure) else {
+    let Err(error) = fluid.state(checked, &case.conditions) else {
         return;
     };
     let detail = format!(
         "{what} is {checked} K in {} at {} Pa: {error}",
         fluid.id(),
-        case.pressure
+        case.conditions.pressure
     );
     for field in blamed(fields, error) {
         faults.push(Fault::at(
@@ -75,8 +75,14 @@ fn hint(field: Field, fields: &Fields) -> String {
 }
 
 /// Refuses a surface and an ambient between which the buoyancy turns round.
-fn check_density_maximum(surface: f64, ambient: f64, fluid: &Fluid, faults: &mut Vec<Fault>) {
-    let Some(turn) = fluid.density_maximum() else {
+fn check_density_maximum(
+    surface: f64,
+    ambient: f64,
+    fluid: &Fluid,
+    conditions: &Conditions,
+    faults: &mut Vec<Fault>,
+) {
+    let Some(turn) = fluid.density_maximum(conditions) else {
         return;
     };
     if surface.min(ambient) < turn && turn < surface.max(ambient) {

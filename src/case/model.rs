@@ -1,7 +1,7 @@
 //! A well-formed case.
 
 use crate::digest::sha256;
-use crate::fluids::{FluidId, Fluids};
+use crate::fluids::{Conditions, FluidId, Fluids};
 use crate::geometry::{DraughtDirection, Extrapolate, Facing, Field, Geometry, Space};
 use crate::methods::{Heating, MethodId};
 use crate::quantity::UnitChoice;
@@ -11,8 +11,8 @@ use super::fault::Fault;
 use super::fields::Fields;
 use super::fluid_check::check_temperatures;
 use super::parts::{
-    check_fields, check_method, check_radiation, exchange, hot_side, read_draught, read_gap,
-    read_pressure, read_surface, require,
+    check_fields, check_method, check_radiation, exchange, hot_side, read_conditions, read_draught,
+    read_gap, read_surface, require,
 };
 use super::size::{Across, Size};
 
@@ -54,8 +54,8 @@ pub struct Case {
     pub ambient_temperature: f64,
     /// The fluid.
     pub fluid: FluidId,
-    /// Its absolute pressure, Pa.
-    pub pressure: f64,
+    /// Its absolute pressure and its composition.
+    pub conditions: Conditions,
     /// Emissivity, where radiation is to be counted; across a gap that of both surfaces together.
     pub emissivity: Option<f64>,
     /// Temperature of what the surface sees, K.
@@ -112,7 +112,6 @@ impl Case {
         let fluid = fields.fluid.unwrap_or_else(Fluids::default_fluid);
         check_radiation(fields, fluids, fluid, faults);
         check_method(geometry, fields, faults);
-        let pressure = read_pressure(fields, faults);
         let (surface, ambient_temperature) = match space {
             Space::Closed => read_gap(fields, faults),
             Space::Open | Space::Channel => (
@@ -120,6 +119,7 @@ impl Case {
                 fields.number(Field::AmbientTemperature),
             ),
         };
+        let conditions = read_conditions(fields, fluids.get(fluid), ambient_temperature, faults);
 
         let (size, ambient_temperature) = (size?, ambient_temperature?);
         let case = Case {
@@ -129,7 +129,7 @@ impl Case {
             surface: surface?,
             ambient_temperature,
             fluid,
-            pressure: pressure?,
+            conditions: conditions?,
             emissivity: match space {
                 Space::Closed => exchange(fields, size.area_ratio),
                 Space::Open | Space::Channel => fields.number(Field::Emissivity),
@@ -174,7 +174,7 @@ impl Case {
         let words = [
             self.geometry.as_str(),
             self.facing.map_or("", Facing::as_str),
-            fluids.get(self.fluid).id(),
+            fluids.get(self.fluid).digest(),
             self.method.map_or("auto", MethodId::as_str),
             self.extrapolate.as_str(),
             across,
@@ -200,7 +200,8 @@ impl Case {
             temperature,
             flux,
             Some(self.ambient_temperature),
-            Some(self.pressure),
+            Some(self.conditions.pressure),
+            Some(self.conditions.composition),
             self.emissivity,
             Some(self.surroundings_temperature),
             self.draught.map(|draught| draught.speed),

@@ -1,6 +1,6 @@
 //! The parts of a case, read from its fields: surface or gap, pressure, radiation, method.
 
-use crate::fluids::{FluidId, Fluids, Phase};
+use crate::fluids::{Composition, Conditions, Fluid, FluidId, Fluids, Phase};
 use crate::geometry::{DIMENSIONS, DraughtDirection, Facing, Field, Geometry, HeatedFrom, Space};
 use crate::methods::{Heating, MethodId};
 
@@ -90,7 +90,7 @@ fn pressure_at(altitude: f64) -> f64 {
     STANDARD_PRESSURE * (1.0 - LAPSE * altitude / SEA_LEVEL_TEMPERATURE).powf(exponent)
 }
 
-pub(super) fn read_pressure(fields: &Fields, faults: &mut Vec<Fault>) -> Option<f64> {
+fn read_pressure(fields: &Fields, faults: &mut Vec<Fault>) -> Option<f64> {
     exclude(fields, Field::Pressure, Field::Altitude, faults);
     if fields.is_given(Field::Altitude) {
         return fields.number(Field::Altitude).map(pressure_at);
@@ -99,6 +99,84 @@ pub(super) fn read_pressure(fields: &Fields, faults: &mut Vec<Fault>) -> Option<
         return fields.number(Field::Pressure);
     }
     Some(STANDARD_PRESSURE)
+}
+
+/// The fluid's pressure and composition.
+pub(super) fn read_conditions(
+    fields: &Fields,
+    fluid: &Fluid,
+    ambient: Option<f64>,
+    faults: &mut Vec<Fault>,
+) -> Option<Conditions> {
+    let pressure = read_pressure(fields, faults);
+    let composition = match fluid.composition() {
+        Composition::Pure => {
+            refuse(fields, Field::Concentration, fluid, faults);
+            refuse(fields, Field::RelativeHumidity, fluid, faults);
+            Some(0.0)
+        }
+        Composition::MassFraction {
+            of,
+            minimum,
+            maximum,
+        } => {
+            refuse(fields, Field::RelativeHumidity, fluid, faults);
+            let why = format!("{} is a mixture", fluid.id());
+            require(fields, Field::Concentration, &why, faults);
+            let given = fields.number(Field::Concentration);
+            if given.is_some_and(|given| !(*minimum..=*maximum).contains(&given)) {
+                faults.push(Fault::at(
+                    Field::Concentration,
+                    "outside-table",
+                    format!(
+                        "concentration is {}; {} is known from {minimum} to {maximum} by mass of {of}",
+                        given.unwrap_or_default(),
+                        fluid.id()
+                    ),
+                ));
+            }
+            given
+        }
+        Composition::Humidity => {
+            refuse(fields, Field::Concentration, fluid, faults);
+            match fields.number(Field::RelativeHumidity) {
+                Some(humidity) => humidity_ratio(humidity, ambient?, pressure?, faults),
+                None => Some(0.0),
+            }
+        }
+    };
+    Some(Conditions {
+        pressure: pressure?,
+        composition: composition?,
+    })
+}
+
+fn humidity_ratio(
+    humidity: f64,
+    ambient: f64,
+    pressure: f64,
+    faults: &mut Vec<Fault>,
+) -> Option<f64> {
+    match Fluids::humidity_ratio(humidity, ambient, pressure) {
+        Ok(ratio) => Some(ratio),
+        Err(error) => {
+            let detail = format!("relative_humidity {humidity} at {ambient} K: {error}");
+            faults.push(Fault::at(Field::RelativeHumidity, "outside-table", detail));
+            None
+        }
+    }
+}
+
+/// A field of mixtures that the fluid does not take.
+fn refuse(fields: &Fields, field: Field, fluid: &Fluid, faults: &mut Vec<Fault>) {
+    if fields.is_given(field) {
+        let detail = format!(
+            "{} is given, but {} does not take it",
+            field.name(),
+            fluid.id()
+        );
+        faults.push(Fault::at(field, "unexpected-field", detail));
+    }
 }
 
 /// Radiation needs its emissivities and a fluid that lets it through.

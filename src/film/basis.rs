@@ -14,7 +14,7 @@ pub fn basis(case: &Case, answer: &Answer, fluids: &Fluids) -> Vec<String> {
         format!(
             "Properties of {} at {} Pa; reference temperature: {}.",
             fluids.get(case.fluid).id(),
-            case.pressure,
+            case.conditions.pressure,
             answer.method.method().reference.text()
         ),
     ];

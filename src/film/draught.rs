@@ -40,9 +40,9 @@ pub(super) fn combine(
     let (method, length) = forced_part(case, draught);
     let stream;
     let (state, viscosity_ratio) = if method.stream_properties {
-        stream = fluid.state(case.ambient_temperature, case.pressure)?;
+        stream = fluid.state(case.ambient_temperature, &case.conditions)?;
         // Where the surface is hotter than the table, the film's viscosity is the nearest known.
-        let at_surface = fluid.state(surface, case.pressure).unwrap_or(*film);
+        let at_surface = fluid.state(surface, &case.conditions).unwrap_or(*film);
         (&stream, stream.viscosity / at_surface.viscosity)
     } else {
         (film, 1.0)

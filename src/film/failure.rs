@@ -57,7 +57,7 @@ impl Failure {
                 format!(
                     "{} at {} Pa: {error}",
                     fluids.get(case.fluid).id(),
-                    case.pressure
+                    case.conditions.pressure
                 ),
             ),
             Failure::Side { method, side } => {

@@ -42,12 +42,12 @@ pub(super) fn surface_temperature(case: &Case, fluid: &Fluid, flux: f64) -> Resu
 /// Surface temperatures whose reference temperatures the fluid's table holds, on the ambient's side of the greatest density.
 fn span(case: &Case, fluid: &Fluid) -> (f64, f64) {
     let ambient = case.ambient_temperature;
-    let (coldest, hottest) = fluid.temperatures_at(case.pressure);
+    let (coldest, hottest) = fluid.temperatures_at(&case.conditions);
     let margin = MARGIN * (hottest - coldest);
     let share = reference_share(case);
     let lowest = (ambient + (coldest + margin - ambient) / share).max(1.0);
     let highest = ambient + (hottest - margin - ambient) / share;
-    match fluid.density_maximum() {
+    match fluid.density_maximum(&case.conditions) {
         Some(turn) if ambient < turn => (lowest, highest.min(turn)),
         Some(turn) => (lowest.max(turn), highest),
         None => (lowest, highest),

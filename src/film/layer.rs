@@ -58,7 +58,7 @@ impl Entered {
 impl<'a> Layer<'a> {
     /// The layer at a surface temperature.
     pub fn new(case: &'a Case, fluid: &'a Fluid, surface: f64) -> Result<Self, StateError> {
-        let film = fluid.state(0.5 * (surface + case.ambient_temperature), case.pressure)?;
+        let film = fluid.state(0.5 * (surface + case.ambient_temperature), &case.conditions)?;
         let rises = film.expansion * (surface - case.ambient_temperature) >= 0.0;
         let side = match case.facing {
             None => Side::Any,
@@ -93,8 +93,8 @@ impl<'a> Layer<'a> {
                     .reference
                     .temperatures(self.surface, case.ambient_temperature);
                 State {
-                    expansion: self.fluid.state(expansion, case.pressure)?.expansion,
-                    ..self.fluid.state(properties, case.pressure)?
+                    expansion: self.fluid.state(expansion, &case.conditions)?.expansion,
+                    ..self.fluid.state(properties, &case.conditions)?
                 }
             }
         };

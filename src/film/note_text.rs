@@ -141,27 +141,27 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
         NoteCode::DensityMaximum => format!(
             "{} is densest at {}; near it the expansion changes fast and the buoyancy can turn round.",
             fluid.name(),
-            fluid.density_maximum().map_or_else(String::new, celsius)
+            fluid.density_maximum(&case.conditions).map_or_else(String::new, celsius)
         ),
         NoteCode::MayBoil => format!(
             "The surface at {surface} is above the boiling point of {} at this pressure, {}; with boiling it loses far more heat.",
             fluid.name(),
-            fluid.saturation_temperature(case.pressure).map_or_else(String::new, celsius)
+            fluid.saturation_temperature(&case.conditions).map_or_else(String::new, celsius)
         ),
         NoteCode::MayCondense => format!(
             "The surface at {surface} is below the condensation point of {} at this pressure, {}; condensation gives it far more heat.",
             fluid.name(),
-            fluid.saturation_temperature(case.pressure).map_or_else(String::new, celsius)
+            fluid.saturation_temperature(&case.conditions).map_or_else(String::new, celsius)
         ),
         NoteCode::MayFreeze => format!(
             "Surface or fluid is below the freezing point of {}, {}; ice changes the heat flow and can burst pipes.",
             fluid.name(),
-            fluid.limits().freezing.map_or_else(String::new, celsius)
+            fluid.limits_at(&case.conditions).freezing.map_or_else(String::new, celsius)
         ),
         NoteCode::AboveFlashPoint => format!(
             "Surface or fluid is above the flash point of {}, about {}: fire hazard. Local codes and the supplier's data sheet govern.",
             fluid.name(),
-            fluid.limits().flash_point.map_or_else(String::new, celsius)
+            fluid.limits_at(&case.conditions).flash_point.map_or_else(String::new, celsius)
         ),
         NoteCode::BurnHazard => burn_text(answer),
         NoteCode::BareNumberAsKelvin => format!(

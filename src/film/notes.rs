@@ -121,14 +121,14 @@ fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
         NoteCode::TableEdge,
     );
     if let PressureRule::IdealGas { reference, .. } = *fluid.pressure_rule() {
-        let away = (case.pressure / reference - 1.0).abs() > PRESSURE_TOLERANCE;
+        let away = (case.conditions.pressure / reference - 1.0).abs() > PRESSURE_TOLERANCE;
         notes.add_if(away, NoteCode::IdealGasFallback);
     }
     let varies = match fluid.phase() {
         Phase::Gas => surface.max(ambient) > STRONG_VARIATION * surface.min(ambient),
         Phase::Liquid => match (
-            fluid.state(surface, case.pressure),
-            fluid.state(ambient, case.pressure),
+            fluid.state(surface, &case.conditions),
+            fluid.state(ambient, &case.conditions),
         ) {
             (Ok(at_surface), Ok(at_ambient)) => {
                 let ratio = at_surface.viscosity / at_ambient.viscosity;
@@ -138,17 +138,17 @@ fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
         },
     };
     notes.add_if(varies, NoteCode::StrongPropertyVariation);
-    if let Some(turn) = fluid.density_maximum() {
+    if let Some(turn) = fluid.density_maximum(&case.conditions) {
         let near = [surface, ambient, answer.film_temperature]
             .iter()
             .any(|temperature| (temperature - turn).abs() <= DENSITY_MAXIMUM_SPAN);
         notes.add_if(near, NoteCode::DensityMaximum);
     }
     let liquid = fluid.phase() == Phase::Liquid;
-    let changes = fluid.is_past_saturation(surface, case.pressure);
+    let changes = fluid.is_past_saturation(surface, &case.conditions);
     notes.add_if(changes && liquid, NoteCode::MayBoil);
     notes.add_if(changes && !liquid, NoteCode::MayCondense);
-    let limits = fluid.limits();
+    let limits = fluid.limits_at(&case.conditions);
     let is_past = |limit: Option<f64>, past: fn(f64, f64) -> bool| {
         limit.is_some_and(|limit| past(surface, limit) || past(ambient, limit))
     };

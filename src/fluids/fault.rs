@@ -1,8 +1,8 @@
-//! What is wrong with the text of a table.
+//! What is wrong with a table.
 
 use std::fmt;
 
-/// What is wrong with a table, and where.
+/// What is wrong with the text of a table, and where.
 #[derive(Clone, PartialEq, Eq, Debug)]
 pub struct TableFault {
     /// Counted from 1.
@@ -14,6 +14,52 @@ pub struct TableFault {
 impl fmt::Display for TableFault {
     fn fmt(&self, out: &mut fmt::Formatter<'_>) -> fmt::Result {
         write!(out, "line {}: {}", self.line, self.detail)
+    }
+}
+
+/// What is wrong with an operator's folder of tables, and where.
+#[derive(Clone, PartialEq, Eq, Debug)]
+pub struct FolderFault {
+    /// The file, or the folder itself.
+    pub file: String,
+    /// Counted from 1; none where the whole file is at fault.
+    pub line: Option<usize>,
+    /// What is wrong and what would do.
+    pub detail: String,
+}
+
+impl fmt::Display for FolderFault {
+    fn fmt(&self, out: &mut fmt::Formatter<'_>) -> fmt::Result {
+        let Self { file, line, detail } = self;
+        match line {
+            Some(line) => write!(out, "{file}:{line}: {detail}"),
+            None => write!(out, "{file}: {detail}"),
+        }
+    }
+}
+
+/// What is wrong with a caller's own table, and where.
+#[derive(Clone, PartialEq, Eq, Debug)]
+pub struct OwnFault {
+    /// The field of [`super::OwnTable`].
+    pub column: &'static str,
+    /// Counted from 0 as the caller wrote them; none where the whole column is at fault.
+    pub row: Option<usize>,
+    /// What is wrong and what would do.
+    pub detail: String,
+}
+
+impl fmt::Display for OwnFault {
+    fn fmt(&self, out: &mut fmt::Formatter<'_>) -> fmt::Result {
+        let Self {
+            column,
+            row,
+            detail,
+        } = self;
+        match row {
+            Some(row) => write!(out, "{column}, row {row}: {detail}"),
+            None => write!(out, "{column}: {detail}"),
+        }
     }
 }
 

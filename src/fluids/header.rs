@@ -1,7 +1,7 @@
 //! The `# key: value` lines of a table.
 
 use super::fault::{Faults, TableFault};
-use super::fluid::{Description, Limits, StatedError};
+use super::fluid::{Description, StatedError};
 use super::pressure::PressureRule;
 use super::rows::positive;
 use super::state::Phase;
@@ -11,9 +11,10 @@ use super::table::PROPERTIES;
 const NOTE: &str = "note";
 
 /// Keys that may stand once.
-const KEYS: [&str; 10] = [
+const KEYS: [&str; 11] = [
     "id",
     "name",
+    "composition",
     "phase",
     "source",
     "pressure rule",
@@ -27,7 +28,15 @@ const KEYS: [&str; 10] = [
 /// What the header of a table says.
 pub(super) struct Header {
     pub(super) description: Description,
+    pub(super) composition: CompositionText,
     pub(super) pressure: PressureText,
+}
+
+/// The composition as written: the fractions of layers stand in the rows.
+pub(super) enum CompositionText {
+    Pure,
+    MassFraction { of: String },
+    Humidity,
 }
 
 /// The pressure rule as written: the pressures of layers stand in the rows.
@@ -37,18 +46,17 @@ pub(super) enum PressureText {
     Rule(PressureRule),
 }
 
-/// The header of a table, or all its faults.
-pub(super) fn header(text: &str) -> Result<Header, Vec<TableFault>> {
+/// The header of a table with this digest, or all its faults.
+pub(super) fn header(text: &str, digest: String) -> Result<Header, Vec<TableFault>> {
     let mut entries = Entries::new(text);
     let id = entries.required("id", id);
     let name = entries.required("name", words);
     let phase = entries.required("phase", phase);
     let source = entries.required("source", words);
     let pressure = entries.required("pressure rule", pressure);
-    let limits = Limits {
-        freezing: entries.optional("freezing", |value| quantity(value, "K")),
-        flash_point: entries.optional("flash point", |value| quantity(value, "K")),
-    };
+    let composition = entries.optional("composition", composition);
+    let freezing = entries.optional("freezing", freezing);
+    let flash_point = entries.optional("flash point", |value| quantity(value, "K"));
     let interpolation_error = entries.optional("interpolation error", stated_error);
     let pressure_error = entries.optional("pressure error", stated_error);
     let expansion_error_floor =
@@ -62,11 +70,14 @@ pub(super) fn header(text: &str) -> Result<Header, Vec<TableFault>> {
                 phase,
                 source,
                 notes,
-                limits,
+                freezing: freezing.unwrap_or_default(),
+                flash_point,
                 interpolation_error,
                 pressure_error,
                 expansion_error_floor,
+                digest,
             },
+            composition: composition.unwrap_or(CompositionText::Pure),
             pressure,
         }),
         _ => None,
@@ -175,6 +186,22 @@ fn quantity(value: &str, unit: &str) -> Result<f64, String> {
         .strip_suffix(unit)
         .and_then(|number| positive(number.trim()))
         .ok_or_else(|| format!("a positive number of {unit}"))
+}
+
+fn composition(value: &str) -> Result<CompositionText, String> {
+    match value.strip_prefix("mass fraction of ") {
+        Some(of) => words(of.trim()).map(|of| CompositionText::MassFraction { of }),
+        None if value == "humidity" => Ok(CompositionText::Humidity),
+        None => Err("\"humidity\" or \"mass fraction of …\"".to_owned()),
+    }
+}
+
+/// One freezing point, or as many as a mixture has layers.
+fn freezing(value: &str) -> Result<Vec<f64>, String> {
+    value
+        .split(',')
+        .map(|part| quantity(part.trim(), "K"))
+        .collect()
 }
 
 fn pressure(value: &str) -> Result<PressureText, String> {

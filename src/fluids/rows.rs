@@ -6,28 +6,32 @@
 use std::ops::RangeInclusive;
 
 use super::fault::{Faults, TableFault};
-use super::table::{PROPERTIES, Values};
+use super::table::{Axis, PROPERTIES, Values};
 
 const TEMPERATURE: &str = "temperature [K]";
 const PRESSURE: &str = "pressure [Pa]";
+const MASS_FRACTION: &str = "mass_fraction [1]";
 const SATURATION: &str = "saturation_pressure [Pa]";
 
 /// Far wider than any fluid's properties in SI, and narrow enough that no coefficient of an
 /// interpolant through them overflows.
-const PLAUSIBLE: RangeInclusive<f64> = 1e-12..=1e12;
+pub(super) const PLAUSIBLE: RangeInclusive<f64> = 1e-12..=1e12;
 
 /// The rows of a table in the order of its text.
 pub(super) struct Body {
     /// Where the column names stand.
     pub(super) line: usize,
+    /// What the column of layers holds, where there is one.
+    pub(super) axis: Option<Axis>,
     pub(super) rows: Vec<Row>,
 }
 
-/// One row; pressures only where the table has them.
+/// One row; its layer and its saturation pressure only where the table has them.
 pub(super) struct Row {
     pub(super) line: usize,
     pub(super) temperature: f64,
-    pub(super) pressure: Option<f64>,
+    /// Its place on the axis.
+    pub(super) layer: Option<f64>,
     pub(super) values: Values,
     pub(super) saturation: Option<f64>,
 }
@@ -48,7 +52,8 @@ pub(super) fn body(text: &str) -> Result<Body, Vec<TableFault>> {
     let rows = lines
         .filter_map(|(line, text)| columns.row(line, &cells(text), &mut faults))
         .collect();
-    faults.or(Some(Body { line, rows }))
+    let axis = columns.layer.map(|(axis, _)| axis);
+    faults.or(Some(Body { line, axis, rows }))
 }
 
 fn cells(line: &str) -> Vec<&str> {
@@ -61,7 +66,7 @@ fn cells(line: &str) -> Vec<&str> {
 struct Columns {
     count: usize,
     temperature: usize,
-    pressure: Option<usize>,
+    layer: Option<(Axis, usize)>,
     properties: [usize; PROPERTIES.len()],
     saturation: Option<usize>,
 }
@@ -71,12 +76,12 @@ impl Columns {
         let properties =
             PROPERTIES.map(|property| format!("{} [{}]", property.name, property.unit));
         for (index, &name) in names.iter().enumerate() {
-            let known = [TEMPERATURE, PRESSURE, SATURATION].contains(&name)
+            let known = [TEMPERATURE, PRESSURE, MASS_FRACTION, SATURATION].contains(&name)
                 || properties.iter().any(|property| property == name);
             if !known {
                 let detail = format!(
                     "unknown column \"{name}\"; the columns are {TEMPERATURE}, {} and where the \
-                     table has them {PRESSURE}, {SATURATION}",
+                     table has them {PRESSURE} or {MASS_FRACTION}, {SATURATION}",
                     properties.join(", ")
                 );
                 faults.add(line, detail);
@@ -85,6 +90,12 @@ impl Columns {
             }
         }
         let find = |wanted: &str| names.iter().position(|&name| name == wanted);
+        let pressure = find(PRESSURE).map(|place| (Axis::Pressure, place));
+        let mass_fraction = find(MASS_FRACTION).map(|place| (Axis::MassFraction, place));
+        if pressure.is_some() && mass_fraction.is_some() {
+            let detail = format!("{PRESSURE} and {MASS_FRACTION} cannot stand in one table");
+            faults.add(line, detail);
+        }
         let mut place = |wanted: &str| {
             find(wanted).unwrap_or_else(|| {
                 faults.add(line, format!("the column {wanted} is missing"));
@@ -94,7 +105,7 @@ impl Columns {
         let columns = Self {
             count: names.len(),
             temperature: place(TEMPERATURE),
-            pressure: find(PRESSURE),
+            layer: pressure.or(mass_fraction),
             properties: properties.map(|property| place(&property)),
             saturation: find(SATURATION),
         };
@@ -109,47 +120,67 @@ impl Columns {
             faults.add(line, format!("{found} cells under {count} column names"));
             return None;
         }
-        let mut read = |name: &str, cell: &str, signed: bool| {
-            number(cell, signed).unwrap_or_else(|wanted| {
+        let mut read = |name: &str, cell: &str, kind: Number| {
+            kind.read(cell).unwrap_or_else(|| {
+                let wanted = kind.wanted();
                 faults.add(line, format!("{name} is {wanted}, not \"{cell}\""));
                 f64::NAN
             })
         };
-        let given = |place: Option<usize>| place.map(|place| cells[place]);
         Some(Row {
             line,
-            temperature: read(TEMPERATURE, cells[self.temperature], false),
-            pressure: given(self.pressure).map(|cell| read(PRESSURE, cell, false)),
+            temperature: read(TEMPERATURE, cells[self.temperature], Number::Positive),
+            layer: self.layer.map(|(axis, place)| match axis {
+                Axis::Pressure => read(PRESSURE, cells[place], Number::Positive),
+                Axis::MassFraction => read(MASS_FRACTION, cells[place], Number::Fraction),
+            }),
             values: std::array::from_fn(|index| {
                 let property = &PROPERTIES[index];
-                read(
-                    property.name,
-                    cells[self.properties[index]],
-                    property.signed,
-                )
+                let kind = if property.signed {
+                    Number::Signed
+                } else {
+                    Number::Positive
+                };
+                read(property.name, cells[self.properties[index]], kind)
             }),
-            saturation: given(self.saturation)
+            saturation: self
+                .saturation
+                .map(|place| cells[place])
                 .filter(|cell| !cell.is_empty())
-                .map(|cell| read(SATURATION, cell, false)),
+                .map(|cell| read(SATURATION, cell, Number::Positive)),
         })
     }
 }
 
-/// A number of plausible size, positive unless it may have either sign.
-fn number(cell: &str, signed: bool) -> Result<f64, &'static str> {
-    if signed {
-        let number = cell.parse().ok();
-        number
-            .filter(|number: &f64| number.abs() <= *PLAUSIBLE.end())
-            .ok_or("a number up to 1e12")
-    } else {
-        positive(cell).ok_or("a positive number, 1e-12 to 1e12")
+/// The numbers that a column takes.
+#[derive(Clone, Copy)]
+enum Number {
+    Positive,
+    Signed,
+    Fraction,
+}
+
+impl Number {
+    fn read(self, cell: &str) -> Option<f64> {
+        let number = cell.parse().ok()?;
+        let fits = match self {
+            Self::Positive => PLAUSIBLE.contains(&number),
+            Self::Signed => number.abs() <= *PLAUSIBLE.end(),
+            Self::Fraction => (0.0..=1.0).contains(&number),
+        };
+        fits.then_some(number)
+    }
+
+    fn wanted(self) -> &'static str {
+        match self {
+            Self::Positive => "a positive number, 1e-12 to 1e12",
+            Self::Signed => "a number up to 1e12",
+            Self::Fraction => "a number from 0 to 1",
+        }
     }
 }
 
 /// A positive number of plausible size.
 pub(super) fn positive(text: &str) -> Option<f64> {
-    text.parse()
-        .ok()
-        .filter(|number| PLAUSIBLE.contains(number))
+    Number::Positive.read(text)
 }

@@ -65,13 +65,21 @@ impl Saturation {
 
 #[cfg(test)]
 mod tests {
-    use super::super::{Fluid, Fluids, StateError};
+    use super::super::{Conditions, Fluid, Fluids, State, StateError};
 
     const ATMOSPHERE: f64 = 101_325.0;
 
     fn fluid(id: &str) -> &'static Fluid {
         let fluids = Fluids::built_in();
         fluids.get(fluids.find(id).expect("a built-in fluid"))
+    }
+
+    fn state(fluid: &Fluid, temperature: f64, pressure: f64) -> Result<State, StateError> {
+        fluid.state(temperature, &Conditions::pure(pressure))
+    }
+
+    fn saturated(fluid: &Fluid, pressure: f64) -> Option<f64> {
+        fluid.saturation_temperature(&Conditions::pure(pressure))
     }
 
     /// CoolProp 8.0.0, water: saturation at these pressures and temperatures.
@@ -85,9 +93,7 @@ mod tests {
             (1e6, 453.0280078816743),
             (5e6, 537.090721954165),
         ] {
-            let found = water
-                .saturation_temperature(pressure)
-                .expect("in the table");
+            let found = saturated(water, pressure).expect("in the table");
             assert!((found - expected).abs() < 1e-4, "{found} for {expected}");
             let back = water.saturation_pressure(found).expect("in the table");
             assert!((back / pressure - 1.0).abs() < 1e-12);
@@ -101,8 +107,8 @@ mod tests {
                 "{found} for {expected}"
             );
         }
-        assert_eq!(water.saturation_temperature(600.0), None);
-        assert_eq!(water.saturation_temperature(9e6), None);
+        assert_eq!(saturated(water, 600.0), None);
+        assert_eq!(saturated(water, 9e6), None);
         assert_eq!(water.saturation_pressure(600.0), None);
         assert_eq!(fluid("air").saturation_pressure(300.0), None);
     }
@@ -110,35 +116,31 @@ mod tests {
     #[test]
     fn water_boils() {
         let water = fluid("water");
-        let saturated = |pressure| {
-            water
-                .saturation_temperature(pressure)
-                .expect("in the table")
-        };
+        let saturated = |pressure| saturated(water, pressure).expect("in the table");
         let at_one_atmosphere = StateError::Boils {
             saturation: saturated(ATMOSPHERE),
         };
-        assert!(water.state(373.12, ATMOSPHERE).is_ok());
-        assert_eq!(water.state(373.13, ATMOSPHERE), Err(at_one_atmosphere));
-        assert_eq!(water.state(650.0, ATMOSPHERE), Err(at_one_atmosphere));
-        assert!(water.state(363.0, 70e3).is_ok());
+        assert!(state(water, 373.12, ATMOSPHERE).is_ok());
+        assert_eq!(state(water, 373.13, ATMOSPHERE), Err(at_one_atmosphere));
+        assert_eq!(state(water, 650.0, ATMOSPHERE), Err(at_one_atmosphere));
+        assert!(state(water, 363.0, 70e3).is_ok());
         assert_eq!(
-            water.state(363.2, 70e3),
+            state(water, 363.2, 70e3),
             Err(StateError::Boils {
                 saturation: saturated(70e3)
             })
         );
-        assert!(water.state(300.0, 2.1e6).is_ok());
+        assert!(state(water, 300.0, 2.1e6).is_ok());
         assert!(matches!(
-            water.state(300.0, 2.2e6),
+            state(water, 300.0, 2.2e6),
             Err(StateError::PressureOutside { .. })
         ));
         assert!(matches!(
-            water.state(300.0, 100.0),
+            state(water, 300.0, 100.0),
             Err(StateError::PressureOutside { .. })
         ));
         assert_eq!(
-            water.state(600.0, 9e6),
+            state(water, 600.0, 9e6),
             Err(StateError::AboveTable { maximum: 573.15 })
         );
     }
@@ -146,27 +148,23 @@ mod tests {
     #[test]
     fn steam_condenses() {
         let steam = fluid("steam");
-        let saturated = |pressure| {
-            steam
-                .saturation_temperature(pressure)
-                .expect("in the table")
-        };
-        assert!(steam.state(373.15, ATMOSPHERE).is_ok());
+        let saturated = |pressure| saturated(steam, pressure).expect("in the table");
+        assert!(state(steam, 373.15, ATMOSPHERE).is_ok());
         assert_eq!(
-            steam.state(350.0, ATMOSPHERE),
+            state(steam, 350.0, ATMOSPHERE),
             Err(StateError::Condenses {
                 saturation: saturated(ATMOSPHERE)
             })
         );
         assert_eq!(
-            steam.state(393.0, 200e3),
+            state(steam, 393.0, 200e3),
             Err(StateError::Condenses {
                 saturation: saturated(200e3)
             })
         );
-        assert!(steam.state(393.5, 200e3).is_ok());
+        assert!(state(steam, 393.5, 200e3).is_ok());
         assert_eq!(
-            steam.state(360.0, 60e3),
+            state(steam, 360.0, 60e3),
             Err(StateError::BelowTable { minimum: 373.12 })
         );
     }

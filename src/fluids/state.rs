@@ -3,11 +3,12 @@
 use std::fmt;
 
 /// Whether a table holds a gas or a liquid.
-#[derive(Clone, Copy, PartialEq, Eq, Debug)]
+#[derive(Clone, Copy, PartialEq, Eq, Debug, Default)]
 pub enum Phase {
     /// Density falls with temperature about as 1/T and grows with pressure.
     Gas,
     /// Density hardly changes with pressure.
+    #[default]
     Liquid,
 }
 
@@ -62,7 +63,7 @@ impl State {
     }
 }
 
-/// Why a fluid has no state at a temperature and pressure.
+/// Why a fluid has no state at a temperature and conditions.
 ///
 /// # Units
 /// Temperatures in K, pressures in Pa.
@@ -95,7 +96,19 @@ pub enum StateError {
         /// The saturation temperature.
         saturation: f64,
     },
-    /// The temperature or the pressure is not a finite number.
+    /// A mixture colder than its freezing point at this composition.
+    Freezes {
+        /// The freezing point.
+        freezing: f64,
+    },
+    /// A composition that the fluid does not have; see [`super::Composition`].
+    CompositionOutside {
+        /// The least composition.
+        minimum: f64,
+        /// The largest composition.
+        maximum: f64,
+    },
+    /// The temperature, the pressure or the composition is not a finite number.
     NotFinite,
 }
 
@@ -122,9 +135,20 @@ impl fmt::Display for StateError {
                 out,
                 "the vapour condenses: at this pressure it is saturated at {saturation:.2} K"
             ),
+            Self::Freezes { freezing } => write!(
+                out,
+                "the mixture begins to freeze: at this concentration its freezing point is {freezing:.2} K"
+            ),
+            Self::CompositionOutside { minimum, maximum } if minimum == maximum => {
+                write!(out, "the fluid has no concentration or humidity to choose")
+            }
+            Self::CompositionOutside { minimum, maximum } => write!(
+                out,
+                "the concentration or humidity ratio is outside the fluid's range, {minimum} to {maximum}"
+            ),
             Self::NotFinite => write!(
                 out,
-                "the temperature or the pressure is not a finite number"
+                "the temperature, the pressure or the composition is not a finite number"
             ),
         }
     }

@@ -1,5 +1,6 @@
-//! The five properties of a fluid by temperature and pressure.
+//! The five properties of a fluid by temperature and by pressure or mass fraction.
 
+use super::conditions::Conditions;
 use super::grid::Position;
 use super::pchip;
 use super::state::{Phase, State};
@@ -25,6 +26,10 @@ pub(super) const PROPERTIES: [Property; 5] = [
     },
 ];
 
+/// Where these stand in [`PROPERTIES`].
+pub(super) const VISCOSITY: usize = 2;
+pub(super) const EXPANSION: usize = 4;
+
 /// One value per property.
 pub(super) type Values = [f64; PROPERTIES.len()];
 
@@ -38,18 +43,26 @@ impl Property {
     }
 }
 
-/// Interpolants of a fluid's properties over one grid, by pressure layer.
+/// What tells a table's layers apart.
+#[derive(Clone, Copy, PartialEq, Eq, Debug)]
+pub(super) enum Axis {
+    Pressure,
+    MassFraction,
+}
+
+/// Interpolants of a fluid's properties over one grid, by layer.
 ///
 /// What is interpolated are not the properties themselves but, for a gas, density × T/p and
 /// expansion × T, both constant in an ideal gas; for a liquid, the logarithm of viscosity.
 pub(super) struct Table {
     phase: Phase,
+    axis: Axis,
     layers: Vec<Layer>,
 }
 
-/// The interpolants at one pressure.
+/// The interpolants at one place on the axis.
 pub(super) struct Layer {
-    pressure: f64,
+    place: f64,
     cells: Vec<Cell>,
 }
 
@@ -76,23 +89,29 @@ impl Cell {
 }
 
 impl Table {
-    /// Layers of one phase and one grid, in order of rising pressure.
-    pub(super) fn new(phase: Phase, layers: Vec<Layer>) -> Self {
-        Self { phase, layers }
+    /// Layers of one phase and one grid, in rising order.
+    pub(super) fn new(phase: Phase, axis: Axis, layers: Vec<Layer>) -> Self {
+        Self {
+            phase,
+            axis,
+            layers,
+        }
     }
 
-    /// Whether every positive property stays positive between the layers, which only gases have.
+    /// Whether every positive property stays positive between the layers.
     ///
     /// Within an interval each layer's values lie between those at its ends; weights that sum to
     /// one and whose negative ones sum to −n leave at least (1 + n) × the least of those values
-    /// less n × the largest.
+    /// less n × the largest. A liquid's viscosity is positive by its logarithm.
     pub(super) fn stays_positive(&self) -> bool {
         let negative = self.negative_weight();
         if negative == 0.0 {
             return true;
         }
         let intervals = self.layers.first().map_or(0, |layer| layer.cells.len() - 1);
-        let mut positive = (0..PROPERTIES.len()).filter(|&index| !PROPERTIES[index].signed);
+        let by_logarithm = |index| index == VISCOSITY && self.phase == Phase::Liquid;
+        let mut positive = (0..PROPERTIES.len())
+            .filter(|&index| !PROPERTIES[index].signed && !by_logarithm(index));
         positive.all(|property| {
             (0..intervals).all(|interval| {
                 let ends = self.layers.iter().flat_map(|layer| {
@@ -112,11 +131,11 @@ impl Table {
         const STEPS: u32 = 32;
         let gaps = self.layers.windows(2);
         gaps.flat_map(|pair| {
-            let (low, high) = (pair[0].pressure, pair[1].pressure);
+            let (low, high) = (pair[0].place, pair[1].place);
             (1..STEPS).map(move |step| low + (high - low) * f64::from(step) / f64::from(STEPS))
         })
-        .map(|pressure| {
-            let weights = (0..self.layers.len()).map(|index| self.weight(index, pressure));
+        .map(|place| {
+            let weights = (0..self.layers.len()).map(|index| self.weight(index, place));
             -weights.filter(|&weight| weight < 0.0).sum::<f64>()
         })
         .fold(0.0, f64::max)
@@ -126,9 +145,22 @@ impl Table {
     ///
     /// Inlined: the caller's only hot call.
     #[inline]
-    pub(super) fn state(&self, position: Position, temperature: f64, pressure: f64) -> State {
+    pub(super) fn state(
+        &self,
+        position: Position,
+        temperature: f64,
+        conditions: &Conditions,
+    ) -> State {
+        let &Conditions {
+            pressure,
+            composition,
+        } = conditions;
+        let place = match self.axis {
+            Axis::Pressure => pressure,
+            Axis::MassFraction => composition,
+        };
         let [density, specific_heat, viscosity, conductivity, expansion] =
-            self.blend(position, pressure);
+            self.blend(position, place);
         match self.phase {
             Phase::Gas => State {
                 density: density * pressure / temperature,
@@ -147,11 +179,19 @@ impl Table {
         }
     }
 
-    /// Lagrange's polynomial in pressure; at a layer's own pressure only that layer is read.
-    fn blend(&self, position: Position, pressure: f64) -> Values {
+    /// The value at a place on the axis of Lagrange's polynomial through one value per layer.
+    pub(super) fn across(&self, by_layer: &[f64], place: f64) -> f64 {
+        let values = by_layer.iter().enumerate();
+        values
+            .map(|(index, value)| self.weight(index, place) * value)
+            .sum()
+    }
+
+    /// Lagrange's polynomial along the axis; at a layer's own place only that layer is read.
+    fn blend(&self, position: Position, place: f64) -> Values {
         let mut blend = [0.0; PROPERTIES.len()];
         for (index, layer) in self.layers.iter().enumerate() {
-            let weight = self.weight(index, pressure);
+            let weight = self.weight(index, place);
             if weight != 0.0 {
                 let values = layer.cells[position.node].at(position.offset);
                 for (sum, value) in blend.iter_mut().zip(values) {
@@ -162,25 +202,26 @@ impl Table {
         blend
     }
 
-    /// Exactly one at the layer's own pressure and exactly zero at every other layer's.
-    fn weight(&self, index: usize, pressure: f64) -> f64 {
-        let own = self.layers[index].pressure;
+    /// Exactly one at the layer's own place and exactly zero at every other layer's.
+    fn weight(&self, index: usize, place: f64) -> f64 {
+        let own = self.layers[index].place;
         self.layers
             .iter()
             .enumerate()
             .filter(|&(other, _)| other != index)
-            .map(|(_, other)| (pressure - other.pressure) / (own - other.pressure))
+            .map(|(_, other)| (place - other.place) / (own - other.place))
             .product()
     }
 }
 
 impl Layer {
-    /// The interpolants through the properties at every node of a grid.
-    pub(super) fn new(phase: Phase, nodes: &[f64], pressure: f64, rows: &[Values]) -> Self {
+    /// The interpolants through the properties at every node of a grid; `place` of a gas is its
+    /// pressure.
+    pub(super) fn new(phase: Phase, nodes: &[f64], place: f64, rows: &[Values]) -> Self {
         let interpolated: Vec<Values> = nodes
             .iter()
             .zip(rows)
-            .map(|(&temperature, &row)| transform(phase, temperature, pressure, row))
+            .map(|(&temperature, &row)| transform(phase, temperature, place, row))
             .collect();
         let mut cells: Vec<Cell> = nodes.iter().map(|_| Cell::default()).collect();
         for property in 0..PROPERTIES.len() {
@@ -191,7 +232,7 @@ impl Layer {
                 }
             }
         }
-        Self { pressure, cells }
+        Self { place, cells }
     }
 }
 

@@ -190,6 +190,10 @@ fields! {
         "absolute pressure of the fluid, 101325 Pa when neither it nor altitude is given", "\"1.2 bar\"";
     Altitude = "altitude", FieldValue::Quantity(Kind::Length, Limits::from(-500.0, 11000.0)),
         "height above sea level, turned into a pressure by the standard atmosphere; stands instead of pressure", "\"1500 m\"";
+    Concentration = "concentration", FieldValue::Quantity(Kind::Number, Limits::from(0.0, 1.0)),
+        "mass fraction of a mixture's named part", "0.3";
+    RelativeHumidity = "relative_humidity", FieldValue::Quantity(Kind::Number, Limits::from(0.0, 1.0)),
+        "relative humidity of air at the ambient temperature, across a gap at the colder surface", "0.6";
     Emissivity = "emissivity", FieldValue::Quantity(Kind::Number, Limits::from(0.0, 1.0)),
         "emissivity of the surface; radiation is counted when it is given", "0.9";
     EmissivityHot = "emissivity_hot", FieldValue::Quantity(Kind::Number, Limits::from(0.0, 1.0)),

@@ -4,7 +4,8 @@
     python3 tests/reference/check_fluids.py http://127.0.0.1:8347
 
 Every fluid is asked between the rows of its table, and where its pressure rule serves more than
-one pressure, at those too. References: CoolProp for real fluids, the iapws package for water and
+one pressure, at those too; mixtures between their mass fractions, air at many humidities.
+References: CoolProp for real fluids, mixtures and humid air, the iapws package for water and
 steam besides, SciPy's PCHIP through the source rows for the oils. Prints the largest deviation
 per fluid and property; exits 1 after listing every failure.
 """
@@ -19,10 +20,12 @@ from pathlib import Path
 
 import iapws
 import numpy as np
-from CoolProp.CoolProp import PropsSI
+from CoolProp import CoolProp as library
+from CoolProp.CoolProp import HAPropsSI, PropsSI
 from scipy.interpolate import PchipInterpolator
 
 from gas_entries import ATMOSPHERE, GASES
+from glycol_entries import CODES, GLYCOLS, PRESSURE
 from oil_tables import OILS
 
 TABLES = Path(__file__).resolve().parents[2] / "src" / "fluids" / "tables"
@@ -37,6 +40,17 @@ GOLDEN = 0.6180339887498949
 # Water's expansion passes through zero: a deviation of up to this many 1/K is within tolerance.
 WATER_EXPANSION = 1e-6
 
+# An expansion that CoolProp does not give is a difference over this many K to either side.
+SLOPE_STEP = 0.05
+
+# Humid air against HAPropsSI, as the notes of the table of air state. That
+# library takes the vapour in the transport properties saturated at the total pressure, near
+# 100 degC, whatever the air's temperature, hence the third and fourth figure.
+HUMID_TOLERANCES = [1e-3, 8e-3, 2.4e-2, 4e-2, 6e-3]
+
+# kg/mol, dry air and water as the equations of state have them.
+MOLAR_MASSES = np.array([0.02896546, 0.018015268])
+
 REFUSED = [
     ("air", 149, ATMOSPHERE),
     ("air", 2001, ATMOSPHERE),
@@ -49,6 +63,12 @@ REFUSED = [
     ("steam", 390, 200e3),
     ("engine-oil", 272, ATMOSPHERE),
     ("ethylene-glycol", 361, ATMOSPHERE),
+    ("ethylene-glycol-water", 300, ATMOSPHERE),
+    ("ethylene-glycol-water", 260, ATMOSPHERE, {"concentration": 0.27}),
+    ("propylene-glycol-water", 300, ATMOSPHERE, {"concentration": 0.62}),
+    ("propylene-glycol-water", 374, ATMOSPHERE, {"concentration": 0.5}),
+    ("air", 300, ATMOSPHERE, {"relative_humidity": 1.1}),
+    ("air", 380, ATMOSPHERE, {"relative_humidity": 1.0}),
 ]
 
 
@@ -65,10 +85,14 @@ class Service:
         except urllib.error.HTTPError as error:
             return error.code, None
 
-    def state(self, fluid, temperature, pressure):
+    def ask(self, fluid, **numbers):
+        """Status and body of a state."""
+        numbers = {name: repr(float(number)) for name, number in numbers.items()}
+        return self.get(f"/v1/fluids/{fluid}/state", **numbers)
+
+    def state(self, fluid, temperature, pressure, **composition):
         """Properties, or none when the service refuses."""
-        path = f"/v1/fluids/{fluid}/state"
-        status, body = self.get(path, temperature=repr(float(temperature)), pressure=repr(float(pressure)))
+        status, body = self.ask(fluid, temperature=temperature, pressure=pressure, **composition)
         return body["properties"] if status == 200 else None
 
 
@@ -106,7 +130,8 @@ class Report:
     def print(self):
         print(f"{'largest deviation, as a fraction':<44}" + "".join(f"{name:>15}" for name in PROPERTIES))
         for label in dict.fromkeys(label for label, _ in self.largest):
-            figures = "".join(f"{self.largest[label, name]:>15.1e}" for name in PROPERTIES)
+            largest = [self.largest.get((label, name)) for name in PROPERTIES]
+            figures = "".join(f"{'' if e is None else f'{e:.1e}':>15}" for e in largest)
             print(f"{label:<44}{figures}")
         print(f"{self.compared} figures compared, {len(self.failures)} failures")
         for failure in self.failures:
@@ -218,6 +243,89 @@ def check_oil(service, report, oil):
             report.compare(f"{oil.id}, source rows", where, found, expected, [2e-7] * 5)
 
 
+def mixture(name, fraction, temperature):
+    """CoolProp has no expansion of mixtures: the slope of its logarithm of density."""
+    fluid = f"INCOMP::{name}[{float(fraction)!r}]"
+    density, *others = [PropsSI(c, "T", temperature, "P", PRESSURE, fluid) for c in CODES]
+    cold, hot = (
+        PropsSI("D", "T", temperature + step, "P", PRESSURE, fluid)
+        for step in (-SLOPE_STEP, SLOPE_STEP)
+    )
+    return [density, *others, np.log(cold / hot) / (2 * SLOPE_STEP)]
+
+
+def check_glycol(service, report, glycol):
+    allowed = stated(glycol.id, "interpolation error") + 1e-5
+    for fraction in [0.1, 0.137, 0.2, 0.25, 0.3, 0.35, 0.4, 0.49, 0.57, 0.6]:
+        name = f"INCOMP::{glycol.library_name}[{fraction}]"
+        freezing = PropsSI("T_freeze", "T", 300, "P", PRESSURE, name)
+        for temperature in between(np.linspace(freezing + 0.1, 373.0, 40)):
+            expected = mixture(glycol.library_name, fraction, temperature)
+            for pressure in (ATMOSPHERE, 30e3, 2e6):
+                found = service.state(glycol.id, temperature, pressure, concentration=fraction)
+                where = f"{fraction}, {temperature:.2f} K, {pressure:.0f} Pa"
+                report.compare(glycol.id, where, found, expected, allowed, WATER_EXPANSION)
+        status, _ = service.ask(glycol.id, temperature=freezing - 0.1, concentration=fraction)
+        if status != 422:
+            report.fail(f"{glycol.id} {fraction} below freezing answers {status}, not 422")
+
+
+def humid_by_library(temperature, pressure, humidity):
+    """HAPropsSI; its expansion as the slope of specific volume at constant humidity ratio."""
+
+    def at(key, temperature, **given):
+        (name, value), = given.items()
+        return HAPropsSI(key, "T", temperature, "P", pressure, name, value)
+
+    ratio = at("W", temperature, R=humidity)
+    cold, middle, hot = (
+        at("Vda", temperature + step, W=ratio) for step in (-SLOPE_STEP, 0, SLOPE_STEP)
+    )
+    others = [at(key, temperature, W=ratio) for key in ("cp_ha", "mu", "k")]
+    return [(1 + ratio) / middle, *others, np.log(hot / cold) / (2 * SLOPE_STEP)]
+
+
+class ThinVapour:
+    """Dry air and water vapour so thin that it may be colder than its boiling point."""
+
+    DENSITY = 1e-9  # kg/m3
+
+    def __init__(self):
+        self.air = library.AbstractState("HEOS", "Air")
+        self.water = library.AbstractState("HEOS", "Water")
+        self.water.specify_phase(library.iphase_gas)
+
+    def transport(self, temperature, pressure, humidity):
+        """Viscosity by Wilke's rule, conductivity by Wassiljewa's with the same factors."""
+        vapour = humidity * PropsSI("P", "T", temperature, "Q", 0, "Water") / pressure
+        shares = np.array([1 - vapour, vapour])
+        self.air.update(library.PT_INPUTS, pressure, temperature)
+        self.water.update(library.DmassT_INPUTS, self.DENSITY, temperature)
+        viscosities = np.array([self.air.viscosity(), self.water.viscosity()])
+        conductivities = np.array([self.air.conductivity(), self.water.conductivity()])
+        masses = MOLAR_MASSES[:, None] / MOLAR_MASSES
+        factors = (1 + (viscosities[:, None] / viscosities) ** 0.5 * masses**-0.25) ** 2
+        weights = shares / (factors / np.sqrt(8 * (1 + masses)) @ shares)
+        return weights @ viscosities, weights @ conductivities
+
+
+def check_humid_air(service, report):
+    vapour = ThinVapour()
+    for temperature in 273.15 + np.array([0.3, 7, 15, 24, 33, 42, 51, 60, 69, 78, 84, 90]):
+        for humidity in [0.1, 0.3, 0.5, 0.7, 0.9, 1.0]:
+            for pressure in [0.8e5, ATMOSPHERE, 1.2e5]:
+                found = service.state("air", temperature, pressure, relative_humidity=humidity)
+                where = f"{temperature:.2f} K, {humidity}, {pressure:.0f} Pa"
+                expected = humid_by_library(temperature, pressure, humidity)
+                report.compare("air, humid", where, found, expected, HUMID_TOLERANCES)
+                if found is None:
+                    continue
+                mixed = vapour.transport(temperature, pressure, humidity)
+                for name, value in zip(("viscosity", "conductivity"), mixed):
+                    label = "air, humid, same mixing rules"
+                    report.one(label, where, name, found[name], value, 5e-5, value)
+
+
 def main(arguments):
     if len(arguments) != 1:
         sys.exit(__doc__)
@@ -227,7 +335,7 @@ def main(arguments):
     if status != 200:
         sys.exit(f"/v1/fluids answers {status}")
     served = {fluid["id"] for fluid in catalogue["fluids"]}
-    known = {entry.id for entry in GASES + OILS} | {"water"}
+    known = {entry.id for entry in GASES + OILS + GLYCOLS} | {"water"}
     for fluid in sorted(served ^ known):
         report.fail(f"{fluid} is {'served but has no reference' if fluid in served else 'not served'}")
     for gas in GASES:
@@ -236,10 +344,14 @@ def main(arguments):
     check_water(service, report)
     for oil in OILS:
         check_oil(service, report, oil)
-    for fluid, temperature, pressure in REFUSED:
-        status, _ = service.get(f"/v1/fluids/{fluid}/state", temperature=temperature, pressure=pressure)
+    for glycol in GLYCOLS:
+        check_glycol(service, report, glycol)
+    check_humid_air(service, report)
+    for fluid, temperature, pressure, *composition in REFUSED:
+        given = composition[0] if composition else {}
+        status, _ = service.ask(fluid, temperature=temperature, pressure=pressure, **given)
         if status != 422:
-            report.fail(f"{fluid} at {temperature} K, {pressure:.0f} Pa answers {status}, not 422")
+            report.fail(f"{fluid} at {temperature} K, {pressure:.0f} Pa, {given} answers {status}, not 422")
     report.print()
     sys.exit(bool(report.failures))
 

@@ -5,11 +5,13 @@
     python3 tests/reference/make_tables.py --check    exits 1 when a file has drifted
 
 Real fluids come from reference equations, see gas_entries.py, evaluated by CoolProp 8.0.0.
-The oils and the glycol are handbook tables, see oil_tables.py.
+The oils and the pure glycol are handbook tables, see oil_tables.py. Mixtures of water and a
+glycol come from fits by temperature and mass fraction, see glycol_entries.py.
 
 Each header states two figures per property, measured here and rounded up:
 interpolation error   between rows, against the reference equation, at nine points of every
-                      interval, in the variables that the service interpolates;
+                      interval, in the variables that the service interpolates; of a mixture
+                      also between its mass fractions;
 pressure error        of the pressure rule over its whole range, at the rows' temperatures and
                       just above saturation.
 """
@@ -25,6 +27,7 @@ from CoolProp import CoolProp as library
 from scipy.interpolate import PchipInterpolator
 
 from gas_entries import ATMOSPHERE, GASES, WATER_SOURCE
+from glycol_entries import GLYCOLS, MELINDER, Fit
 from oil_tables import OILS
 
 TABLES = Path(__file__).resolve().parents[2] / "src" / "fluids" / "tables"
@@ -40,23 +43,24 @@ SMALL_EXPANSION = 2e-4
 
 @dataclass
 class Table:
-    """One file: header lines, then rows by pressure layer."""
+    """One file: header lines, then rows by layer of pressure or mass fraction."""
 
     header: list[str]
     temperatures: np.ndarray
     layers: dict[float, np.ndarray]
     saturation: np.ndarray | None = None
+    layer_column: str = "pressure [Pa]"
 
     def text(self):
         layered = len(self.layers) > 1
-        columns = ["pressure [Pa]"] * layered + ["temperature [K]"]
+        columns = [self.layer_column] * layered + ["temperature [K]"]
         columns += [f"{name} [{unit}]" for name, unit in zip(PROPERTIES, UNITS)]
         columns += ["saturation_pressure [Pa]"] * (self.saturation is not None)
         lines = [f"# {line}" for line in self.header] + [",".join(columns)]
-        for pressure, rows in self.layers.items():
+        for layer, rows in self.layers.items():
             for index, (temperature, row) in enumerate(zip(self.temperatures, rows)):
                 cells = (
-                    [digits(pressure)] * layered + [digits(temperature)] + [digits(v) for v in row]
+                    [digits(layer)] * layered + [digits(temperature)] + [digits(v) for v in row]
                 )
                 if self.saturation is not None:
                     at = self.saturation[index]
@@ -138,11 +142,15 @@ def gas_interpolant(temperatures, rows, pressure):
     return at
 
 
-def liquid_interpolant(temperatures, rows):
-    """The logarithm of viscosity is interpolated."""
+def lanes(rows):
+    """What is interpolated of a liquid: the logarithm of viscosity, the rest as it stands."""
     lanes = rows.copy()
     lanes[:, VISCOSITY] = np.log(lanes[:, VISCOSITY])
-    curves = PchipInterpolator(temperatures, lanes)
+    return lanes
+
+
+def liquid_interpolant(temperatures, rows):
+    curves = PchipInterpolator(temperatures, lanes(rows))
 
     def at(points):
         values = curves(points)
@@ -150,6 +158,11 @@ def liquid_interpolant(temperatures, rows):
         return values
 
     return at
+
+
+def lagrange_weight(layer, layers, at):
+    """The share of a layer in a Lagrange polynomial through all of them."""
+    return np.prod([(at - other) / (layer - other) for other in layers if other != layer])
 
 
 def between(temperatures):
@@ -161,6 +174,14 @@ def between(temperatures):
 def deviations(found, expected):
     """Largest relative deviation of every property."""
     return np.abs(found / expected - 1).max(axis=0)
+
+
+def liquid_deviations(found, expected):
+    """Largest relative deviation of every property, and of small expansions in 1/K."""
+    small = np.abs(expected[:, EXPANSION]) < SMALL_EXPANSION
+    errors = deviations(found, expected)
+    errors[EXPANSION] = deviations(found[~small], expected[~small])[EXPANSION]
+    return errors, np.abs(found - expected)[small, EXPANSION].max()
 
 
 def saturation_error(reference, temperatures, saturation):
@@ -193,6 +214,7 @@ def gas(entry):
     header = [
         f"id: {entry.id}",
         f"name: {entry.name}",
+        *entry.composition,
         "phase: gas",
         f"source: {entry.source}; {LIBRARY}",
         f"pressure rule: {rule}",
@@ -220,8 +242,7 @@ def gas_pressure_error(reference, temperatures, layers, pressures):
         points = np.append(lowest, temperatures[temperatures > lowest])
         found = np.zeros((len(points), len(PROPERTIES)))
         for layer, curve in curves.items():
-            weight = np.prod([(pressure - p) / (layer - p) for p in layers if p != layer])
-            found += weight * curve(points, pressure)
+            found += lagrange_weight(layer, layers, pressure) * curve(points, pressure)
         errors.append(deviations(found, reference.rows(points, pressure)))
     return np.max(errors, axis=0)
 
@@ -240,11 +261,7 @@ def water():
 
     points = between(temperatures)
     found = liquid_interpolant(temperatures, rows)(points)
-    expected = reference.rows(points, pressures_at(points))
-    interpolation = deviations(found, expected)
-    small = np.abs(expected[:, EXPANSION]) < SMALL_EXPANSION
-    floor = np.abs(found - expected)[small, EXPANSION].max()
-    interpolation[EXPANSION] = deviations(found[~small], expected[~small])[EXPANSION]
+    interpolation, floor = liquid_deviations(found, reference.rows(points, pressures_at(points)))
 
     def pressure_error(limit):
         chosen = temperatures <= limit
@@ -282,6 +299,51 @@ def water():
         "the equations continued",
     ]
     return Table(header, temperatures, {ATMOSPHERE: rows}, saturation)
+
+
+def glycol(entry):
+    """A mixture's fits at every mass fraction."""
+    fit = Fit(entry.library_name)
+    temperatures = entry.temperatures
+    layers = {x: rounded(fit.rows(temperatures, x)) for x in entry.fractions}
+    freezing = {x: float(digits(fit.freezing(x))) for x in layers}
+    curves = {x: PchipInterpolator(temperatures, lanes(rows)) for x, rows in layers.items()}
+    found, expected, curve_misses = [], [], []
+    for fraction in np.linspace(entry.fractions[0], entry.fractions[-1], 51):
+        weights = {x: lagrange_weight(x, layers, fraction) for x in layers}
+        lowest = fit.freezing(fraction)
+        curve_misses.append(abs(sum(weights[x] * freezing[x] for x in layers) - lowest))
+        points = np.concatenate([temperatures, between(temperatures)])
+        points = points[points >= lowest]
+        values = sum(weights[x] * curve(points) for x, curve in curves.items())
+        values[:, VISCOSITY] = np.exp(values[:, VISCOSITY])
+        found.append(values)
+        expected.append(fit.rows(points, fraction))
+    found, expected = np.concatenate(found), np.concatenate(expected)
+    interpolation, floor = liquid_deviations(found, expected)
+    notes = [
+        "properties are polynomials in mass fraction of degree 5, which the layers hold exactly",
+        f"freezing curve between layers within {rounded_up(max(curve_misses))} K of the fit",
+        "rows below the freezing curve continue the fit so that layers share their temperatures; "
+        "no state is given there",
+        f"where expansion is below {SMALL_EXPANSION:g} 1/K its interpolation error is the floor",
+        "fits to the ASHRAE Handbook's tables, as the same library holds them, differ by up to "
+        + stated(fit.ashrae_spread(entry.ashrae_name, entry.fractions)),
+        *entry.notes,
+    ]
+    header = [
+        f"id: {entry.id}",
+        f"name: {entry.name}",
+        f"composition: mass fraction of {entry.solute}",
+        "phase: liquid",
+        f"source: {MELINDER}; {LIBRARY}",
+        f"pressure rule: incompressible at {digits(ATMOSPHERE)} Pa, 30000 to 2000000 Pa",
+        f"freezing: {', '.join(f'{digits(t)} K' for t in freezing.values())}",
+        f"interpolation error: {stated(interpolation)}",
+        f"expansion error floor: {rounded_up(floor)} 1/K",
+    ]
+    header += [f"note: {note}" for note in notes]
+    return Table(header, temperatures, layers, layer_column="mass_fraction [1]")
 
 
 def oil(entry):
@@ -338,6 +400,7 @@ def main(arguments):
     tables = {entry.id: gas(entry) for entry in GASES}
     tables["water"] = water()
     tables |= {entry.id: oil(entry) for entry in OILS}
+    tables |= {entry.id: glycol(entry) for entry in GLYCOLS}
     faults = []
     for name, table in tables.items():
         path = TABLES / f"{name}.csv"

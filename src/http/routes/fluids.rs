@@ -11,7 +11,7 @@ use utoipa::openapi::path::{Parameter, ParameterIn};
 use utoipa::{IntoParams, ToSchema};
 
 use crate::case::{Fault, STANDARD_PRESSURE, shown};
-use crate::fluids::{Fluid, StatedError};
+use crate::fluids::{Conditions, Fluid, StatedError};
 use crate::http::answer::{PropertiesReply, property_units};
 use crate::http::extract::{AcceptsJson, Query, read_query_quantity};
 use crate::http::problem::{Problem, ProblemBody, ProblemKind};
@@ -122,6 +122,8 @@ impl ErrorView {
 impl<'a> FluidView<'a> {
     fn new(fluid: &'a Fluid) -> Self {
         let (minimum_temperature, maximum_temperature) = fluid.temperatures();
+        let conditions = Conditions::pure(STANDARD_PRESSURE);
+        let limits = fluid.limits_at(&conditions);
         FluidView {
             id: fluid.id(),
             name: fluid.name(),
@@ -132,10 +134,10 @@ impl<'a> FluidView<'a> {
             maximum_temperature,
             pressure_rule: fluid.pressure_rule().name(),
             pressure_range: fluid.pressure_rule().to_string(),
-            freezing: fluid.limits().freezing,
-            saturation: fluid.saturation_temperature(STANDARD_PRESSURE),
-            flash_point: fluid.limits().flash_point,
-            density_maximum: fluid.density_maximum(),
+            freezing: limits.freezing,
+            saturation: fluid.saturation_temperature(&conditions),
+            flash_point: limits.flash_point,
+            density_maximum: fluid.density_maximum(&conditions),
             rows: fluid.nodes(),
             interpolation_error: fluid.interpolation_error().map(ErrorView::new),
             pressure_error: fluid.pressure_error().map(ErrorView::new),
@@ -248,7 +250,7 @@ pub async fn read_fluid_state(
     let (Some(temperature), Some(pressure), []) = (temperature, pressure, faults.as_slice()) else {
         return Err(Problem::invalid(faults));
     };
-    match fluid.state(temperature, pressure) {
+    match fluid.state(temperature, &Conditions::pure(pressure)) {
         Ok(state) => {
             let reply = FluidState {
                 fluid: fluid.id(),

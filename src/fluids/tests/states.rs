@@ -1,41 +1,11 @@
-//! The built-in fluids against their reference equations.
+//! The built-in fluids against their reference equations, pure.
 //!
 //! Figures marked CoolProp were given by CoolProp 8.0.0, whose equations each table's header
 //! names; they lie between the tables' rows.
 
 use std::collections::HashSet;
 
-use super::{Fluid, Fluids, Phase, PressureRule, State, StateError};
-
-const ATMOSPHERE: f64 = 101_325.0;
-
-fn fluid(id: &str) -> &'static Fluid {
-    let fluids = Fluids::built_in();
-    fluids.get(fluids.find(id).expect("a built-in fluid"))
-}
-
-fn state(id: &str, temperature: f64, pressure: f64) -> State {
-    fluid(id).state(temperature, pressure).expect("a state")
-}
-
-fn properties(state: &State) -> [f64; 5] {
-    [
-        state.density,
-        state.specific_heat,
-        state.viscosity,
-        state.conductivity,
-        state.expansion,
-    ]
-}
-
-fn assert_within(tolerance: f64, found: &State, expected: [f64; 5]) {
-    for (found, expected) in properties(found).into_iter().zip(expected) {
-        assert!(
-            (found / expected - 1.0).abs() < tolerance,
-            "{found} for {expected}"
-        );
-    }
-}
+use super::*;
 
 #[test]
 fn every_table_is_read_and_answers() {
@@ -53,14 +23,22 @@ fn every_table_is_read_and_answers() {
                 Phase::Gas => ATMOSPHERE.min(saturation.unwrap_or(ATMOSPHERE)),
                 Phase::Liquid => ATMOSPHERE.max(saturation.unwrap_or(ATMOSPHERE)),
             };
-            let state = fluid.state(temperature, pressure).expect("inside");
+            let conditions = Conditions {
+                pressure,
+                composition: fluid.composition().bounds().1,
+            };
+            let (coldest, hottest) = fluid.temperatures_at(&conditions);
+            if !(coldest..=hottest).contains(&temperature) {
+                continue;
+            }
+            let state = fluid.state(temperature, &conditions).expect("inside");
             let [.., expansion] = properties(&state);
             assert!(expansion.is_finite());
             assert!(properties(&state)[..4].iter().all(|&value| value > 0.0));
             assert!(state.prandtl() > 0.0 && state.diffusivity() > 0.0);
         }
     }
-    assert_eq!(ids.len(), 11);
+    assert_eq!(ids.len(), 15);
 }
 
 #[test]
@@ -155,7 +133,7 @@ fn layers_join_without_a_step() {
     assert_within(1e-11, &beside, properties(&at));
 }
 
-/// CoolProp: helium, carbon dioxide, steam.
+/// CoolProp: helium, carbon dioxide, oxygen, methane, steam.
 #[test]
 fn other_gases() {
     for (id, temperature, expected) in [
@@ -179,6 +157,22 @@ fn other_gases() {
                 1.6566988e-5,
                 0.019344279,
                 0.0030385248,
+            ],
+        ),
+        (
+            "oxygen",
+            333.0,
+            [1.1714585, 925.50193, 2.2434782e-5, 0.02904282, 0.0030099975],
+        ),
+        (
+            "methane",
+            333.0,
+            [
+                0.58777709,
+                2320.521,
+                1.2280548e-5,
+                0.039178797,
+                0.0030171472,
             ],
         ),
         (
@@ -218,8 +212,14 @@ fn an_ideal_gas_scales_its_density() {
         minimum: 50e3,
         maximum: 200e3,
     };
-    assert_eq!(fluid("nitrogen").state(333.0, 49.9e3), Err(refused));
-    assert_eq!(fluid("nitrogen").state(333.0, 201e3), Err(refused));
+    assert_eq!(
+        fluid("nitrogen").state(333.0, &Conditions::pure(49.9e3)),
+        Err(refused)
+    );
+    assert_eq!(
+        fluid("nitrogen").state(333.0, &Conditions::pure(201e3)),
+        Err(refused)
+    );
 }
 
 /// CoolProp, water.
@@ -275,7 +275,11 @@ fn liquids_ignore_pressure_within_reason() {
     let low = state("transformer-oil", 320.0, 30e3);
     let high = state("transformer-oil", 320.0, 2e6);
     assert_eq!(low, high);
-    assert!(fluid("transformer-oil").state(320.0, 2.1e6).is_err());
+    assert!(
+        fluid("transformer-oil")
+            .state(320.0, &Conditions::pure(2.1e6))
+            .is_err()
+    );
     assert!(matches!(
         fluid("transformer-oil").pressure_rule(),
         PressureRule::Incompressible { .. }
@@ -284,42 +288,58 @@ fn liquids_ignore_pressure_within_reason() {
 
 #[test]
 fn limits_are_known_where_they_exist() {
-    assert_eq!(fluid("water").limits().freezing, Some(273.15));
-    assert_eq!(fluid("ethylene-glycol").limits().freezing, Some(260.0));
-    assert_eq!(fluid("transformer-oil").limits().flash_point, Some(408.15));
-    assert_eq!(fluid("air").limits(), super::Limits::default());
+    let limits = |id| fluid(id).limits_at(&Conditions::pure(ATMOSPHERE));
+    assert_eq!(limits("water").freezing, Some(273.15));
+    assert_eq!(limits("ethylene-glycol").freezing, Some(260.0));
+    assert_eq!(limits("transformer-oil").flash_point, Some(408.15));
+    assert_eq!(limits("air"), Limits::default());
 }
 
 #[test]
 fn outside_is_refused() {
     let air = fluid("air");
     assert_eq!(
-        air.state(149.9, ATMOSPHERE),
+        air.state(149.9, &Conditions::pure(ATMOSPHERE)),
         Err(StateError::BelowTable { minimum: 150.0 })
     );
     assert_eq!(
-        air.state(2000.1, ATMOSPHERE),
+        air.state(2000.1, &Conditions::pure(ATMOSPHERE)),
         Err(StateError::AboveTable { maximum: 2000.0 })
     );
     assert_eq!(
-        air.state(300.0, 29e3),
+        air.state(300.0, &Conditions::pure(29e3)),
         Err(StateError::PressureOutside {
             minimum: 30e3,
             maximum: 1e6
         })
     );
-    assert!(air.state(300.0, -ATMOSPHERE).is_err());
-    assert!(air.state(150.0, 1e6).is_ok() && air.state(2000.0, 30e3).is_ok());
+    assert!(air.state(300.0, &Conditions::pure(-ATMOSPHERE)).is_err());
+    assert!(
+        air.state(150.0, &Conditions::pure(1e6)).is_ok()
+            && air.state(2000.0, &Conditions::pure(30e3)).is_ok()
+    );
 }
 
 #[test]
 fn what_is_not_a_number_is_refused() {
     for (_, fluid) in Fluids::built_in().iter() {
         for wrong in [f64::NAN, f64::INFINITY, f64::NEG_INFINITY] {
-            assert_eq!(fluid.state(wrong, ATMOSPHERE), Err(StateError::NotFinite));
-            assert_eq!(fluid.state(400.0, wrong), Err(StateError::NotFinite));
+            assert_eq!(
+                fluid.state(wrong, &Conditions::pure(ATMOSPHERE)),
+                Err(StateError::NotFinite)
+            );
+            assert_eq!(
+                fluid.state(400.0, &Conditions::pure(wrong)),
+                Err(StateError::NotFinite)
+            );
             assert_eq!(fluid.saturation_pressure(wrong), None);
-            assert_eq!(fluid.saturation_temperature(wrong), None);
+            let conditions = Conditions::pure(wrong);
+            assert_eq!(fluid.saturation_temperature(&conditions), None);
+            let conditions = Conditions {
+                pressure: ATMOSPHERE,
+                composition: wrong,
+            };
+            assert_eq!(fluid.state(400.0, &conditions), Err(StateError::NotFinite));
         }
     }
 }
