@@ -6,6 +6,7 @@ use tokio::net::TcpListener;
 use tokio::signal::unix::{SignalKind, signal};
 
 use crate::config::{Command, Config, ServeConfig};
+use crate::fluids::Fluids;
 use crate::geometry::Geometry;
 use crate::http;
 
@@ -24,6 +25,7 @@ pub fn run(config: Config) -> Result<(), String> {
 }
 
 fn serve(config: &ServeConfig) -> Result<(), String> {
+    let fluids = read_fluids(config)?;
     let runtime = tokio::runtime::Builder::new_multi_thread()
         .enable_all()
         .build()
@@ -36,10 +38,11 @@ fn serve(config: &ServeConfig) -> Result<(), String> {
             .local_addr()
             .map_err(|error| format!("cannot tell the address listened on: {error}"))?;
         let end = end_signal().map_err(|error| format!("cannot wait for signals: {error}"))?;
-        let service = http::Service::new(http::RequestLimits {
+        let limits = http::RequestLimits {
             body_bytes: config.body_bytes,
             body_time: config.body_timeout,
-        });
+        };
+        let service = http::Service::new(fluids, limits);
         let router = http::router(service);
         let example = http::example_request(Geometry::HorizontalCylinder);
         print(&format!(
@@ -54,6 +57,24 @@ fn serve(config: &ServeConfig) -> Result<(), String> {
             .await
             .map_err(|error| format!("cannot go on serving: {error}"))
     })
+}
+
+/// The built-in fluids and those of the operator's folder, for as long as the program runs.
+fn read_fluids(config: &ServeConfig) -> Result<&'static Fluids, String> {
+    let Some(folder) = &config.fluids else {
+        return Ok(Fluids::built_in());
+    };
+    match Fluids::with_folder(folder) {
+        Ok(fluids) => Ok(Box::leak(Box::new(fluids))),
+        Err(faults) => {
+            let told: Vec<_> = faults.iter().map(|fault| format!("\n  {fault}")).collect();
+            Err(format!(
+                "the fluids in {} are not in order:{}",
+                folder.display(),
+                told.concat()
+            ))
+        }
+    }
 }
 
 /// Resolves at SIGTERM or Ctrl-C.

@@ -1,5 +1,6 @@
 //! Flags and environment, read once into one typed value.
 
+use std::path::PathBuf;
 use std::time::Duration;
 
 use clap::{Parser, Subcommand};
@@ -41,6 +42,9 @@ pub struct ServeConfig {
         default_value = "127.0.0.1:8347"
     )]
     pub listen: String,
+    /// Folder with fluids of your own, CSV tables like the built-in ones.
+    #[arg(long, value_name = "DIR", env = "PLUMELINE_FLUIDS")]
+    pub fluids: Option<PathBuf>,
     /// Largest body that is read, in bytes.
     #[arg(long, value_name = "BYTES", env = "PLUMELINE_BODY_BYTES", default_value_t = 1 << 20)]
     pub body_bytes: usize,

@@ -60,6 +60,7 @@ pub const CODES: &[(&str, &str)] = &[
         "outside-table",
         "the fluid's properties are not known there",
     ),
+    ("bad-table", "a fluid's own table is not in order"),
     (
         "density-maximum",
         "the two temperatures lie on both sides of the fluid's greatest density",

@@ -20,4 +20,5 @@ pub use fault::{CODES, Fault, pointer};
 pub use fields::Fields;
 pub use model::{Case, Draught, STANDARD_GRAVITY, STANDARD_PRESSURE, Surface};
 pub use note::{NoteCode, Notes, Severity};
+pub use parts::read_conditions_alone;
 pub use size::{Across, Flow, Size};

@@ -67,6 +67,8 @@ choice! {
         BareNumberAsKelvin = "bare-number-as-kelvin",
         /// The gas's density away from the table's pressure follows the ideal rule.
         IdealGasFallback = "ideal-gas-fallback",
+        /// The densities of a caller's table are too rough for their slope.
+        RoughExpansion = "rough-expansion",
         /// The film is at the edge of the fluid's table.
         TableEdge = "table-edge",
         /// Surface and ambient have one temperature.
@@ -98,9 +100,10 @@ impl NoteCode {
             | NoteCode::AboveFlashPoint
             | NoteCode::EqualTemperatures => Some(Field::SurfaceTemperature),
             NoteCode::BareNumberAsKelvin => Some(Field::AmbientTemperature),
-            NoteCode::StrongPropertyVariation | NoteCode::DensityMaximum | NoteCode::TableEdge => {
-                Some(Field::Fluid)
-            }
+            NoteCode::StrongPropertyVariation
+            | NoteCode::DensityMaximum
+            | NoteCode::RoughExpansion
+            | NoteCode::TableEdge => Some(Field::Fluid),
             NoteCode::Transition | NoteCode::EndsNotCounted | NoteCode::PureConduction => None,
         }
     }

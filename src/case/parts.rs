@@ -4,6 +4,9 @@ use crate::fluids::{Composition, Conditions, Fluid, FluidId, Fluids, Phase};
 use crate::geometry::{DIMENSIONS, DraughtDirection, Facing, Field, Geometry, HeatedFrom, Space};
 use crate::methods::{Heating, MethodId};
 
+use crate::quantity::UnitChoice;
+
+use super::entries::Entries;
 use super::fault::Fault;
 use super::fields::Fields;
 use super::model::{Draught, STANDARD_GRAVITY, STANDARD_PRESSURE, Surface};
@@ -99,6 +102,21 @@ fn read_pressure(fields: &Fields, faults: &mut Vec<Fault>) -> Option<f64> {
         return fields.number(Field::Pressure);
     }
     Some(STANDARD_PRESSURE)
+}
+
+/// A fluid's pressure and composition at a temperature, without a case around them.
+///
+/// # Errors
+/// What is wrong is added to `faults`.
+pub fn read_conditions_alone(
+    entries: &Entries,
+    fluids: &Fluids,
+    fluid: &Fluid,
+    temperature: Option<f64>,
+    faults: &mut Vec<Fault>,
+) -> Option<Conditions> {
+    let fields = Fields::read(entries, &UnitChoice::default(), fluids, faults);
+    read_conditions(&fields, fluid, temperature, faults)
 }
 
 /// The fluid's pressure and composition.

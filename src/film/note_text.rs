@@ -71,6 +71,7 @@ fn severity(code: NoteCode, answer: &Answer) -> Severity {
         | NoteCode::LowEmissivityReading
         | NoteCode::MethodsDisagree
         | NoteCode::StrongPropertyVariation
+        | NoteCode::RoughExpansion
         | NoteCode::MayCondense
         | NoteCode::DraughtMatters
         | NoteCode::DraughtGoverns
@@ -168,6 +169,7 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
             "The ambient temperature came without a unit and was read as {} K; if degrees Celsius are meant, write \"{} degC\".",
             case.ambient_temperature, case.ambient_temperature
         ),
+        NoteCode::RoughExpansion => "The table gives no expansion and its densities scatter by more than a hundredth of their change: the expansion taken from them is doubtful.".to_owned(),
         NoteCode::TableEdge => format!(
             "The film is at the edge of the table of {}; beyond it there is no answer.",
             fluid.id()

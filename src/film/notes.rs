@@ -124,6 +124,7 @@ fn fluid_notes(case: &Case, fluid: &Fluid, answer: &Answer, notes: &mut Notes) {
         let away = (case.conditions.pressure / reference - 1.0).abs() > PRESSURE_TOLERANCE;
         notes.add_if(away, NoteCode::IdealGasFallback);
     }
+    notes.add_if(fluid.expansion_is_rough(), NoteCode::RoughExpansion);
     let varies = match fluid.phase() {
         Phase::Gas => surface.max(ambient) > STRONG_VARIATION * surface.min(ambient),
         Phase::Liquid => match (

@@ -14,6 +14,7 @@ use utoipa::{PartialSchema, ToSchema};
 use crate::case::{CODES, Column, ColumnType, NoteCode, PROPERTIES, Severity};
 use crate::fluids::Fluids;
 use crate::geometry::{Field, FieldValue};
+use crate::http::extract::COLUMNS;
 use crate::methods::{MethodId, RangeStatus};
 use crate::quantity::Kind;
 
@@ -163,7 +164,11 @@ impl PartialSchema for FilmRequest {
             "One surface in one fluid. Which dimensions a body takes is in /v1/geometries; give surface_temperature, heat_flux or heat_flow.",
         ));
         for &field in Field::ALL {
-            object = object.property(field.name(), field_schema(field));
+            let schema = match field {
+                Field::Fluid => fluid_or_table(),
+                field => field_schema(field),
+            };
+            object = object.property(field.name(), schema);
         }
         object
             .property(
@@ -193,13 +198,73 @@ impl ToSchema for FilmRequest {
     }
 
     fn schemas(schemas: &mut Schemas) {
-        for kind in Field::ALL.iter().filter_map(|field| field.kind()) {
+        schemas.push(("FluidTable".to_owned(), fluid_table()));
+        let columns = COLUMNS.iter().map(|&(_, kind)| kind);
+        for kind in Field::ALL
+            .iter()
+            .filter_map(|field| field.kind())
+            .chain(columns)
+        {
             let name = kind_schema_name(kind);
             if !schemas.iter().any(|(known, _)| *known == name) {
                 schemas.push((name, quantity(kind).into()));
             }
         }
     }
+}
+
+/// A fluid's id, or a table of the caller's own.
+fn fluid_or_table() -> RefOr<Schema> {
+    let entry = Field::Fluid.entry();
+    let text = format!("{}, or a table of the caller's own", entry.text);
+    let either = open(fluid_ids(), true).item(reference("FluidTable"));
+    described(either, &text, example(entry.example))
+}
+
+fn fluid_table() -> RefOr<Schema> {
+    let mut object = ObjectBuilder::new()
+        .description(Some(
+            "A caller's own fluid by temperature, one value a row, at least three rows. Either viscosity or kinematic_viscosity; without an expansion it comes from a smooth fit of the densities.",
+        ))
+        .additional_properties(Some(AdditionalProperties::FreeForm(false)));
+    for (name, kind) in COLUMNS {
+        let text = format!("{} of every row", name.replace('_', " "));
+        let column = ArrayBuilder::new()
+            .items(reference(&kind_schema_name(kind)))
+            .schema_type(types(&[Type::Array, Type::Null]))
+            .description(Some(text))
+            .examples([json!([1.0, 2.0, 3.0])]);
+        object = object.property(name, column);
+    }
+    let nullable_text = |text: &str, shown: &str| {
+        ObjectBuilder::new()
+            .schema_type(types(&[Type::String, Type::Null]))
+            .description(Some(text))
+            .examples([json!(shown)])
+    };
+    object
+        .property(
+            "source",
+            nullable_text("where the figures come from", "data sheet of the supplier"),
+        )
+        .property(
+            "phase",
+            closed(&["liquid", "gas"], true)
+                .description(Some("liquid when not given"))
+                .examples([json!("liquid")]),
+        )
+        .property(
+            "flash_point",
+            AnyOfBuilder::new()
+                .item(reference(&kind_schema_name(Kind::Temperature)))
+                .description(Some("flash point, where there is one"))
+                .examples([json!("210 degC")]),
+        )
+        .required("temperature")
+        .required("density")
+        .required("specific_heat")
+        .required("conductivity")
+        .into()
 }
 
 fn figure(kind: Kind, nullable: bool, text: &str, shown: Value) -> RefOr<Schema> {

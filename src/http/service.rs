@@ -32,11 +32,8 @@ pub struct Service {
 }
 
 impl Service {
-    /// The built-in fluids with these limits.
-    pub fn new(limits: RequestLimits) -> Self {
-        Service {
-            fluids: Fluids::built_in(),
-            limits,
-        }
+    /// These fluids, with these limits.
+    pub fn new(fluids: &'static Fluids, limits: RequestLimits) -> Self {
+        Service { fluids, limits }
     }
 }

@@ -6,7 +6,7 @@ use std::path::{Path, PathBuf};
 
 /// What each module may import from; a module may always use itself.
 const LAYERS: &[(&str, &[&str])] = &[
-    ("cli", &["config", "geometry", "http"]),
+    ("cli", &["config", "fluids", "geometry", "http"]),
     (
         "http",
         &[

@@ -3,6 +3,7 @@
 use axum::body::Body;
 use axum::http::{HeaderMap, Request, StatusCode, header};
 use http_body_util::BodyExt;
+use plumeline::fluids::Fluids;
 use plumeline::http::{RequestLimits, Service, router};
 use serde_json::{Value, json};
 use tower::ServiceExt;
@@ -41,7 +42,7 @@ fn call(request: Request<Body>) -> Reply {
         .build()
         .unwrap();
     runtime.block_on(async {
-        let service = Service::new(RequestLimits::default());
+        let service = Service::new(Fluids::built_in(), RequestLimits::default());
         let response = router(service).oneshot(request).await.unwrap();
         let (parts, body) = response.into_parts();
         let bytes = body.collect().await.unwrap().to_bytes();

@@ -8,9 +8,11 @@ use serde_json::error::Category;
 use serde_json::value::RawValue;
 
 use crate::case::{Fault, Given, duplicate_field};
+use crate::geometry::Field;
 use crate::http::problem::{Problem, ProblemKind};
 use crate::quantity::{Kind, UnitChoice};
 
+use super::own_table::{OWN_TABLE, read_own_table};
 use super::{ANSWER_KINDS, FIELD_KINDS, FilmInput, UNIT_MEMBERS, keep_choice};
 
 /// Reads one case; what is wrong with its members stays in the input's faults.
@@ -21,6 +23,7 @@ pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
     let members = read_members(bytes).map_err(|error| refusal(bytes, &error))?;
     let mut input = FilmInput::default();
     let mut chosen: [Option<&RawValue>; 2] = [None; 2];
+    let mut own_table = None;
     for (name, raw) in &members {
         if input.is_hopeless() {
             break;
@@ -31,7 +34,13 @@ pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
             }
             continue;
         }
-        if let Err(fault) = input.entries.put(name, read_value(raw), &UNIT_MEMBERS) {
+        let value = if name == Field::Fluid.name() && raw.get().starts_with('{') {
+            own_table = Some(raw);
+            Some(Given::Text(OWN_TABLE.into()))
+        } else {
+            read_value(raw)
+        };
+        if let Err(fault) = input.entries.put(name, value, &UNIT_MEMBERS) {
             input.faults.push(fault);
         }
     }
@@ -43,6 +52,10 @@ pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
         &ANSWER_KINDS,
         &mut input.faults,
     );
+    if let Some(raw) = own_table {
+        input.own_fluid = read_own_table(raw, &input.units, &mut input.faults);
+        input.bad_own_fluid = input.own_fluid.is_none();
+    }
     Ok(input)
 }
 
@@ -64,10 +77,10 @@ fn refusal(bytes: &[u8], error: &serde_json::Error) -> Problem {
     }
 }
 
-type Members<'a> = Vec<(Cow<'a, str>, &'a RawValue)>;
+pub(super) type Members<'a> = Vec<(Cow<'a, str>, &'a RawValue)>;
 
 /// The members of an object in their order, duplicates and all.
-fn read_members(bytes: &[u8]) -> serde_json::Result<Members<'_>> {
+pub(super) fn read_members(bytes: &[u8]) -> serde_json::Result<Members<'_>> {
     struct MembersVisitor;
 
     impl<'de> Visitor<'de> for MembersVisitor {
@@ -97,7 +110,7 @@ fn read_members(bytes: &[u8]) -> serde_json::Result<Members<'_>> {
 struct Key<'a>(#[serde(borrow)] Cow<'a, str>);
 
 /// A raw value's meaning as far as JSON goes; null is *not given*.
-fn read_value(raw: &RawValue) -> Option<Given<'_>> {
+pub(super) fn read_value(raw: &RawValue) -> Option<Given<'_>> {
     let text = raw.get();
     Some(match text.as_bytes().first() {
         Some(b'n') => return None,

@@ -3,21 +3,24 @@
 mod accept;
 mod body;
 mod json;
+mod own_table;
 mod query;
 
 pub use accept::AcceptsJson;
 pub use body::JsonBody;
 pub use json::read_film_body;
+pub use own_table::COLUMNS;
 pub use query::{Query, QueryOptions};
 
 use std::sync::LazyLock;
 
 use crate::case::{Entries, Fault, answer_kinds};
+use crate::fluids::Fluid;
 use crate::geometry::Field;
 use crate::quantity::{ChoiceFault, Kind, UnitChoice, parse};
 
 /// A case as it came, and the units chosen for its numbers and for its answer.
-#[derive(Debug, Default)]
+#[derive(Default)]
 pub struct FilmInput<'a> {
     /// The case's raw values.
     pub entries: Entries<'a>,
@@ -25,6 +28,10 @@ pub struct FilmInput<'a> {
     pub units: UnitChoice,
     /// Units of the answer.
     pub answer_units: UnitChoice,
+    /// The caller's own fluid, where the request brings one.
+    pub own_fluid: Option<Fluid>,
+    /// Whether the request brings an own fluid that is not in order.
+    pub bad_own_fluid: bool,
     /// What is wrong so far.
     pub faults: Vec<Fault>,
     /// Whether the rest was left unread because so much is wrong.

@@ -1,5 +1,7 @@
 //! `/v1/film`: one case, one answer.
 
+use std::borrow::Cow;
+
 use axum::extract::State;
 use axum::http::HeaderMap;
 use axum::response::{IntoResponse, Response};
@@ -9,6 +11,7 @@ use utoipa::openapi::{ObjectBuilder, Type};
 
 use crate::case::{Answer, Case, Cell, Column, Entries, Fault, Given, Wanted};
 use crate::film::evaluate;
+use crate::fluids::Fluids;
 use crate::geometry::Field;
 use crate::http::answer::FilmReply;
 use crate::http::extract::{AcceptsJson, FilmInput, JsonBody, Query, QueryOptions, read_film_body};
@@ -39,8 +42,8 @@ pub async fn create_film(
     JsonBody(bytes): JsonBody,
 ) -> Result<Response, Problem> {
     let mut input = read_film_body(&bytes)?;
-    let (case, answer) = solve(&mut input, service, Wanted::ALL)?;
-    Ok(json(&reply(&input, service, &case, &answer))?.into_response())
+    let solved = solve(&mut input, service, Wanted::ALL)?;
+    Ok(json(&solved.reply(&input))?.into_response())
 }
 
 /// The parameters of `GET /v1/film`.
@@ -126,14 +129,14 @@ fn answer_query(
     } else {
         Wanted::of(&options.want)
     };
-    let (case, answer) = solve(input, service, wanted)?;
+    let solved = solve(input, service, wanted)?;
     if options.want.is_empty() {
         accepts?;
-        return json(&reply(input, service, &case, &answer));
+        return json(&solved.reply(input));
     }
     let cells = options.want.iter().map(|&column| {
         let unit = unit.unwrap_or_else(|| column_unit(column, &input.answer_units));
-        cell_text((column.entry().cell)(&answer), unit)
+        cell_text((column.entry().cell)(&solved.answer), unit)
     });
     Ok(text(cells.collect::<Vec<_>>().join(",")))
 }
@@ -183,44 +186,55 @@ fn cell_text(cell: Cell, unit: Unit) -> String {
     }
 }
 
-/// Makes a case of the input and evaluates it as a block of one.
-fn solve(
-    input: &mut FilmInput,
-    service: Service,
-    wanted: Wanted,
-) -> Result<(Case, Answer), Problem> {
-    if input.unread {
-        return Err(Problem::invalid(std::mem::take(&mut input.faults)));
-    }
-    let case = match Case::read(&input.entries, &input.units, service.fluids) {
-        Ok(case) if input.faults.is_empty() => case,
-        Ok(_) => return Err(Problem::invalid(std::mem::take(&mut input.faults))),
-        Err(found) => {
-            input.faults.extend(found);
-            return Err(Problem::invalid(std::mem::take(&mut input.faults)));
+/// A case with its answer and the fluids it was found with.
+struct Solved {
+    case: Case,
+    answer: Answer,
+    fluids: Cow<'static, Fluids>,
+}
+
+impl Solved {
+    fn reply<'a>(&'a self, input: &'a FilmInput) -> FilmReply<'a> {
+        FilmReply {
+            case: &self.case,
+            answer: &self.answer,
+            fluids: &self.fluids,
+            units: &input.answer_units,
+            id: label(&input.entries),
         }
-    };
-    let mut outcomes = Vec::with_capacity(1);
-    evaluate(&[case], service.fluids, wanted, &mut outcomes);
-    match outcomes.pop() {
-        Some(Ok(answer)) => Ok((case, answer)),
-        Some(Err(failure)) => Err(Problem::invalid(vec![failure.fault(&case, service.fluids)])),
-        None => Err(internal("no outcome")),
     }
 }
 
-fn reply<'a>(
-    input: &'a FilmInput,
-    service: Service,
-    case: &'a Case,
-    answer: &'a Answer,
-) -> FilmReply<'a> {
-    FilmReply {
-        case,
-        answer,
-        fluids: service.fluids,
-        units: &input.answer_units,
-        id: label(&input.entries),
+/// Makes a case of the input and evaluates it as a block of one.
+fn solve(input: &mut FilmInput, service: Service, wanted: Wanted) -> Result<Solved, Problem> {
+    let mut faults = std::mem::take(&mut input.faults);
+    if input.unread {
+        return Err(Problem::invalid(faults));
+    }
+    let fluids = match input.own_fluid.take() {
+        Some(own) => Cow::Owned(service.fluids.with_own(own).0),
+        None => Cow::Borrowed(service.fluids),
+    };
+    let case = match Case::read(&input.entries, &input.units, &fluids) {
+        Ok(case) if faults.is_empty() => case,
+        read => {
+            let found = read.err().unwrap_or_default();
+            // A table that is not in order has been told already.
+            let told = |fault: &Fault| input.bad_own_fluid && fault.pointer == "#/fluid";
+            faults.extend(found.into_iter().filter(|fault| !told(fault)));
+            return Err(Problem::invalid(faults));
+        }
+    };
+    let mut outcomes = Vec::with_capacity(1);
+    evaluate(&[case], &fluids, wanted, &mut outcomes);
+    match outcomes.pop() {
+        Some(Ok(answer)) => Ok(Solved {
+            case,
+            answer,
+            fluids,
+        }),
+        Some(Err(failure)) => Err(Problem::invalid(vec![failure.fault(&case, &fluids)])),
+        None => Err(internal("no outcome")),
     }
 }
 

@@ -10,13 +10,14 @@ use serde::Serialize;
 use utoipa::openapi::path::{Parameter, ParameterIn};
 use utoipa::{IntoParams, ToSchema};
 
-use crate::case::{Fault, STANDARD_PRESSURE, shown};
-use crate::fluids::{Conditions, Fluid, StatedError};
+use crate::case::{Entries, Fault, Given, STANDARD_PRESSURE, read_conditions_alone, shown};
+use crate::fluids::{Composition, Conditions, Fluid, StatedError};
+use crate::geometry::Field;
 use crate::http::answer::{PropertiesReply, property_units};
 use crate::http::extract::{AcceptsJson, Query, read_query_quantity};
 use crate::http::problem::{Problem, ProblemBody, ProblemKind};
 use crate::http::reply::{json, tagged};
-use crate::http::schema::{Properties, quantity_parameter};
+use crate::http::schema::{Properties, field_schema, parameter, quantity_parameter};
 use crate::http::service::Service;
 use crate::quantity::{Kind, UnitChoice, nearest};
 
@@ -70,6 +71,8 @@ pub struct FluidView<'a> {
     /// Temperature of the greatest density, K; null where there is none in the table.
     #[schema(example = 277.13)]
     density_maximum: Option<f64>,
+    /// What the composition of a mixture is given by; null for a pure fluid.
+    composition: Option<CompositionView<'a>>,
     /// Number of temperatures in the table.
     #[schema(example = 136)]
     rows: usize,
@@ -77,6 +80,48 @@ pub struct FluidView<'a> {
     interpolation_error: Option<ErrorView>,
     /// Largest deviation of the pressure rule over its range, fractions; null where not stated.
     pressure_error: Option<ErrorView>,
+}
+
+/// What the composition of a mixture is given by.
+#[derive(Serialize, ToSchema)]
+#[schema(as = FluidComposition)]
+pub struct CompositionView<'a> {
+    /// The field that gives it: concentration or relative_humidity.
+    #[schema(example = "concentration")]
+    field: &'static str,
+    /// What the fraction is of.
+    #[schema(example = "ethylene glycol")]
+    of: &'a str,
+    /// Smallest value.
+    #[schema(example = 0.1)]
+    minimum: f64,
+    /// Largest value.
+    #[schema(example = 0.6)]
+    maximum: f64,
+}
+
+impl<'a> CompositionView<'a> {
+    fn new(composition: &'a Composition) -> Option<Self> {
+        match composition {
+            Composition::Pure => None,
+            Composition::MassFraction {
+                of,
+                minimum,
+                maximum,
+            } => Some(CompositionView {
+                field: Field::Concentration.name(),
+                of,
+                minimum: *minimum,
+                maximum: *maximum,
+            }),
+            Composition::Humidity => Some(CompositionView {
+                field: Field::RelativeHumidity.name(),
+                of: "water vapour at the ambient temperature",
+                minimum: 0.0,
+                maximum: 1.0,
+            }),
+        }
+    }
 }
 
 /// Largest deviations of a fluid's properties, fractions.
@@ -138,6 +183,7 @@ impl<'a> FluidView<'a> {
             saturation: fluid.saturation_temperature(&conditions),
             flash_point: limits.flash_point,
             density_maximum: fluid.density_maximum(&conditions),
+            composition: CompositionView::new(fluid.composition()),
             rows: fluid.nodes(),
             interpolation_error: fluid.interpolation_error().map(ErrorView::new),
             pressure_error: fluid.pressure_error().map(ErrorView::new),
@@ -175,6 +221,9 @@ pub struct FluidState<'a> {
     /// Absolute pressure, Pa.
     #[schema(example = 101325.0)]
     pressure: f64,
+    /// Mass fraction of a mixture's named part, humidity ratio of air in kg/kg; 0 for pure fluids.
+    #[schema(example = 0.0)]
+    composition: f64,
     /// The properties, SI.
     #[schema(value_type = Properties)]
     properties: PropertiesReply<'a>,
@@ -183,25 +232,28 @@ pub struct FluidState<'a> {
     units: BTreeMap<&'static str, &'static str>,
 }
 
+/// What a state depends on beside its temperature.
+const CONDITIONS: [Field; 4] = [
+    Field::Pressure,
+    Field::Altitude,
+    Field::Concentration,
+    Field::RelativeHumidity,
+];
+
 /// The parameters of a state.
 pub struct StateQuery;
 
 impl IntoParams for StateQuery {
     fn into_params(_: impl Fn() -> Option<ParameterIn>) -> Vec<Parameter> {
-        vec![
-            quantity_parameter(
-                "temperature",
-                "temperature of the fluid",
-                true,
-                Kind::Temperature,
-            ),
-            quantity_parameter(
-                "pressure",
-                "absolute pressure, 101325 Pa when not given",
-                false,
-                Kind::Pressure,
-            ),
-        ]
+        let temperature = quantity_parameter(
+            "temperature",
+            "temperature of the fluid",
+            true,
+            Kind::Temperature,
+        );
+        let others = CONDITIONS
+            .map(|field| parameter(field.name(), field.entry().text, false, field_schema(field)));
+        [temperature].into_iter().chain(others).collect()
     }
 }
 
@@ -231,7 +283,11 @@ pub async fn read_fluid_state(
         return Err(unknown_fluid(&id, service));
     };
     let mut faults = Vec::new();
-    let [temperature, pressure] = query.read_named(["temperature", "pressure"], &mut faults);
+    let names = CONDITIONS.map(Field::name);
+    let [temperature, given @ ..] = query.read_named(
+        ["temperature", names[0], names[1], names[2], names[3]],
+        &mut faults,
+    );
     let temperature = match temperature {
         Some(text) => read_query_quantity("temperature", Kind::Temperature, &text, &mut faults),
         None => {
@@ -243,19 +299,24 @@ pub async fn read_fluid_state(
             None
         }
     };
-    let pressure = match pressure {
-        Some(text) => read_query_quantity("pressure", Kind::Pressure, &text, &mut faults),
-        None => Some(STANDARD_PRESSURE),
-    };
-    let (Some(temperature), Some(pressure), []) = (temperature, pressure, faults.as_slice()) else {
+    let mut entries = Entries::default();
+    for (field, text) in CONDITIONS.into_iter().zip(given) {
+        let value = text.filter(|text| !text.is_empty()).map(Given::Text);
+        faults.extend(entries.put(field.name(), value, &[]).err());
+    }
+    let conditions =
+        read_conditions_alone(&entries, service.fluids, fluid, temperature, &mut faults);
+    let (Some(temperature), Some(conditions), []) = (temperature, conditions, faults.as_slice())
+    else {
         return Err(Problem::invalid(faults));
     };
-    match fluid.state(temperature, &Conditions::pure(pressure)) {
+    match fluid.state(temperature, &conditions) {
         Ok(state) => {
             let reply = FluidState {
                 fluid: fluid.id(),
                 temperature,
-                pressure,
+                pressure: conditions.pressure,
+                composition: conditions.composition,
                 properties: PropertiesReply {
                     state: &state,
                     units: &UnitChoice::default(),
@@ -268,8 +329,9 @@ pub async fn read_fluid_state(
             &["temperature"],
             "outside-table",
             format!(
-                "{} at {temperature} K and {pressure} Pa: {error}",
-                fluid.id()
+                "{} at {temperature} K and {} Pa: {error}",
+                fluid.id(),
+                conditions.pressure
             ),
         )])),
     }

@@ -5,8 +5,9 @@ use axum::response::Response;
 use serde::Serialize;
 use utoipa::ToSchema;
 
-use crate::geometry::{Field, FieldValue, Geometry};
+use crate::geometry::{Field, FieldValue, Geometry, GeometryEntry};
 use crate::http::extract::AcceptsJson;
+use crate::http::openapi::example_request;
 use crate::http::problem::Problem;
 use crate::http::reply::{json, tagged};
 
@@ -34,8 +35,15 @@ pub struct GeometryView {
     per_length_of: Option<&'static str>,
     /// The ways to give its size: all required fields, and at most one of the optional ones.
     sizes: Vec<SizeView>,
-    /// The other fields it takes; give `surface_temperature`, `heat_flux` or `heat_flow`.
-    fields: Vec<FieldView>,
+    /// Fields beside its size that must be given.
+    required: Vec<FieldView>,
+    /// Fields of which exactly one must be given; empty where there is no such choice.
+    one_of: Vec<FieldView>,
+    /// Fields that may be given.
+    optional: Vec<FieldView>,
+    /// An example request.
+    #[schema(value_type = Object, example = json!({"geometry": "sphere"}))]
+    example: serde_json::Value,
 }
 
 /// One way to give a body's size.
@@ -109,11 +117,9 @@ pub async fn list_geometries(
     _accepts: AcceptsJson,
     headers: HeaderMap,
 ) -> Result<Response, Problem> {
-    let common = Field::ALL
-        .iter()
-        .filter(|field| !crate::geometry::DIMENSIONS.contains(field) && **field != Field::Geometry);
-    let view =
-        |(geometry, entry): (Geometry, &'static crate::geometry::GeometryEntry)| GeometryView {
+    let view = |(geometry, entry): (Geometry, &'static GeometryEntry)| {
+        let fields = entry.space.fields();
+        GeometryView {
             id: geometry.as_str(),
             name: entry.name,
             characteristic_length: entry.characteristic_length,
@@ -126,8 +132,12 @@ pub async fn list_geometries(
                     optional: FieldView::list(form.optional),
                 })
                 .collect(),
-            fields: FieldView::list(common.clone()),
-        };
+            required: FieldView::list(fields.required),
+            one_of: FieldView::list(fields.one_of),
+            optional: FieldView::list(fields.optional),
+            example: example_request(geometry),
+        }
+    };
     let geometries = Geometry::all().map(view).collect();
     Ok(tagged(json(&Geometries { geometries })?, &headers))
 }
