@@ -1,12 +1,15 @@
 //! The log: one JSON line an event on standard error, gathered for a moment so that a request does not wait for the disk.
 
+use std::fmt;
 use std::io::{self, Write};
 use std::mem;
-use std::sync::{Arc, Condvar, Mutex, MutexGuard, PoisonError};
+use std::sync::{Arc, Condvar, Mutex, MutexGuard, OnceLock, PoisonError};
 use std::thread::{self, JoinHandle};
-use std::time::Duration;
+use std::time::{Duration, SystemTime, UNIX_EPOCH};
 
 use tracing_subscriber::fmt::MakeWriter;
+use tracing_subscriber::fmt::format::Writer;
+use tracing_subscriber::fmt::time::FormatTime;
 
 /// How long lines are gathered.
 const PAUSE: Duration = Duration::from_millis(20);
@@ -68,6 +71,61 @@ impl<'a> MakeWriter<'a> for Gathering {
     }
 }
 
+/// What a request came to.
+pub struct RequestLine<'a> {
+    /// Its id, letters, digits and `-_.:` alone.
+    pub id: &'a str,
+    /// Its method.
+    pub method: &'a str,
+    /// Its path, without the query.
+    pub path: &'a str,
+    /// The status of its answer.
+    pub status: u16,
+    /// How long it took.
+    pub time: Duration,
+}
+
+static RUNNING: OnceLock<Arc<Shared>> = OnceLock::new();
+
+/// Writes the line of a request, if the log runs.
+///
+/// One a request makes this the log's only hot line, so it is put together by hand; everything else goes through `tracing`.
+pub fn request(line: &RequestLine) {
+    let Some(shared) = RUNNING.get() else {
+        return;
+    };
+    // Texts are always written as JSON.
+    let path = serde_json::to_string(line.path).unwrap_or_default();
+    let method = serde_json::to_string(line.method).unwrap_or_default();
+    let text = format!(
+        "{{\"timestamp\":\"{}\",\"level\":\"INFO\",\"message\":\"request\",\"request_id\":\"{}\",\"method\":{method},\"path\":{path},\"status\":{},\"microseconds\":{}}}\n",
+        Now,
+        line.id,
+        line.status,
+        line.time.as_micros()
+    );
+    // Gathering lines does not fail.
+    let _ = Gathering(Arc::clone(shared)).write_all(text.as_bytes());
+}
+
+/// The time of an event: seconds since 1970-01-01 UTC, with microseconds.
+struct Now;
+
+impl fmt::Display for Now {
+    fn fmt(&self, out: &mut fmt::Formatter<'_>) -> fmt::Result {
+        let now = SystemTime::now()
+            .duration_since(UNIX_EPOCH)
+            .unwrap_or_default();
+        write!(out, "{}.{:06}", now.as_secs(), now.subsec_micros())
+    }
+}
+
+impl FormatTime for Now {
+    fn format_time(&self, out: &mut Writer<'_>) -> fmt::Result {
+        write!(out, "{Now}")
+    }
+}
+
 /// The running log; what is in hand is written when it is dropped.
 pub struct Log {
     shared: Arc<Shared>,
@@ -81,8 +139,10 @@ pub fn start() -> Log {
         .json()
         .flatten_event(true)
         .with_target(false)
+        .with_timer(Now)
         .with_writer(Gathering(Arc::clone(&shared)))
         .init();
+    RUNNING.get_or_init(|| Arc::clone(&shared));
     let writing = Arc::clone(&shared);
     Log {
         shared,

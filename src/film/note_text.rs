@@ -1,7 +1,7 @@
 //! Notes in words, written where an answer leaves.
 
 use crate::case::{Answer, Case, NoteCode, Severity};
-use crate::fluids::Fluids;
+use crate::fluids::{Composition, Fluids};
 use crate::geometry::{Field, Space};
 use crate::methods::{Groups, Quantity, curvature_factor};
 use crate::quantity::{Kind, Unit};
@@ -151,7 +151,10 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
         ),
         NoteCode::MayCondense => format!(
             "The surface at {surface} is below the condensation point of {} at this pressure, {}; condensation gives it far more heat.",
-            fluid.name(),
+            match fluid.composition() {
+                Composition::Humidity => "the air's moisture",
+                _ => fluid.name(),
+            },
             fluid.saturation_temperature(&case.conditions).map_or_else(String::new, celsius)
         ),
         NoteCode::MayFreeze => format!(

@@ -12,26 +12,25 @@ mod schema;
 mod server;
 mod service;
 
-use axum::Router;
 use axum::http::{Method, StatusCode};
 use axum::response::{IntoResponse, Response};
-use tower_http::catch_panic::CatchPanicLayer;
 
 use problem::{Problem, ProblemKind};
 
+pub use observe::Observed;
 pub use openapi::{document, example_request};
 pub use server::{ConnectionLimits, serve};
 pub use service::{RequestLimits, Service};
 
-/// All routes with every layer of the service, ready to be served or called without a port.
-pub fn router(service: Service) -> Router {
+/// All routes, observed: ready to be served or called without a port.
+pub fn router(service: Service) -> Observed {
     let (routes, _) = openapi::routes().split_for_parts();
-    routes
-        .fallback(not_found)
-        .method_not_allowed_fallback(other_method)
-        .layer(CatchPanicLayer::custom(panicked))
-        .layer(axum::middleware::from_fn(observe::observe))
-        .with_state(service)
+    Observed::new(
+        routes
+            .fallback(not_found)
+            .method_not_allowed_fallback(other_method)
+            .with_state(service),
+    )
 }
 
 async fn not_found(uri: axum::http::Uri) -> Problem {
@@ -52,9 +51,4 @@ async fn other_method(method: Method) -> Response {
         format!("{method} is not taken here; the header Allow lists what is"),
     )
     .into_response()
-}
-
-/// The cause of a panic goes to the log by the panic hook, not to the caller.
-fn panicked(_cause: Box<dyn std::any::Any + Send>) -> Response {
-    Problem::new(ProblemKind::Internal, "the service failed on this request").into_response()
 }

@@ -3,12 +3,13 @@
 use std::io;
 use std::time::Duration;
 
-use axum::Router;
 use hyper::server::conn::http1;
 use hyper_util::rt::{TokioIo, TokioTimer};
 use hyper_util::server::graceful::GracefulShutdown;
 use hyper_util::service::TowerToHyperService;
 use tokio::net::TcpListener;
+
+use super::observe::Observed;
 
 /// How long connections may take.
 #[derive(Clone, Copy, Debug)]
@@ -25,7 +26,7 @@ pub struct ConnectionLimits {
 /// Listening failed for good.
 pub async fn serve(
     listener: TcpListener,
-    router: Router,
+    routes: Observed,
     limits: ConnectionLimits,
     end: impl Future<Output = ()>,
 ) -> io::Result<()> {
@@ -49,7 +50,7 @@ pub async fn serve(
         };
         // Without it small answers wait; where it fails they only wait longer.
         let _ = stream.set_nodelay(true);
-        let service = TowerToHyperService::new(router.clone());
+        let service = TowerToHyperService::new(routes.clone());
         let connection = http.serve_connection(TokioIo::new(stream), service);
         let connection = running.watch(connection);
         tokio::spawn(async move {

@@ -7,6 +7,7 @@ mod choice;
 mod concentric;
 mod convex_body;
 mod entry;
+mod evidence;
 pub mod forced;
 mod groups;
 mod horizontal_cylinder;
@@ -31,6 +32,7 @@ use crate::geometry::{Geometry, choice};
 
 pub use choice::choose;
 pub use entry::{Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source};
+pub use evidence::{Evidence, evidence};
 pub use groups::{Groups, Quantity, Range, RangeStatus, Verdict};
 pub use vertical_cylinder::curvature_factor;
 

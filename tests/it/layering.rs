@@ -10,7 +10,7 @@ const LAYERS: &[(&str, &[&str])] = &[
     (
         "http",
         &[
-            "case", "digest", "film", "fluids", "geometry", "methods", "quantity",
+            "case", "digest", "film", "fluids", "geometry", "log", "methods", "quantity",
         ],
     ),
     (

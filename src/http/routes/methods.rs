@@ -8,7 +8,7 @@ use utoipa::ToSchema;
 use crate::http::extract::AcceptsJson;
 use crate::http::problem::Problem;
 use crate::http::reply::{json, tagged};
-use crate::methods::{Method, MethodId, Range, Scatter};
+use crate::methods::{Evidence, Method, MethodId, Range, Scatter, evidence};
 
 /// All methods.
 #[derive(Serialize, ToSchema)]
@@ -54,6 +54,57 @@ pub struct MethodView {
     remark: &'static str,
     /// A worked figure that the service reproduces.
     example: ExampleView,
+    /// How it was checked, and how far it is from the check; empty where it was checked against a second typing of its formula alone.
+    checks: Vec<CheckView>,
+}
+
+/// One figure that a method was checked against.
+#[derive(Serialize, ToSchema)]
+#[schema(as = MethodCheck)]
+pub struct CheckView {
+    /// The check's name.
+    #[schema(example = "cengel-9-1-formula")]
+    check: &'static str,
+    /// Where the figure stands.
+    #[schema(example = "Cengel, Heat Transfer, example 9-1")]
+    source: &'static str,
+    /// published value, computed benchmark or common practice.
+    #[schema(example = "published value")]
+    kind: &'static str,
+    /// How the figure came here: found, memory, common practice or computed.
+    #[schema(example = "found")]
+    read: &'static str,
+    /// What it is.
+    #[schema(example = "nusselt")]
+    figure: &'static str,
+    /// The published value; of two cases' ratio where the check compares two.
+    #[schema(example = 17.4)]
+    value: f64,
+    /// How far the service is known to lie from it, a fraction.
+    #[schema(example = 0.0)]
+    deviation: f64,
+    /// The cause of the deviation and of the check's tolerance.
+    #[schema(example = "the figure is printed to four figures")]
+    reason: &'static str,
+}
+
+impl CheckView {
+    fn new(found: &'static Evidence) -> Self {
+        CheckView {
+            check: &found.check,
+            source: &found.source,
+            kind: match found.read.as_str() {
+                "computed" => "computed benchmark",
+                "common practice" => "common practice",
+                _ => "published value",
+            },
+            read: &found.read,
+            figure: &found.figure,
+            value: found.value,
+            deviation: found.deviation,
+            reason: &found.reason,
+        }
+    }
 }
 
 /// Where a method was published.
@@ -205,6 +256,7 @@ impl MethodView {
                 nusselt: example.nusselt,
                 from: example.from,
             },
+            checks: evidence(id).iter().map(CheckView::new).collect(),
         }
     }
 }
