@@ -4,8 +4,8 @@ use criterion::{BenchmarkId, Criterion, Throughput, criterion_group, criterion_m
 use plumeline::case::{Case, Column, Entries, Given, Wanted};
 use plumeline::film::evaluate;
 use plumeline::fluids::Fluids;
-use plumeline::geometry::{Facing, Geometry};
-use plumeline::quantity::UnitChoice;
+use plumeline::geometry::{Field, FieldValue, Geometry, Space};
+use plumeline::quantity::{Kind, UnitChoice};
 
 const ROWS: usize = 4096;
 
@@ -17,30 +17,41 @@ fn mixed() -> Vec<Case> {
 fn case(row: usize) -> Case {
     let geometry = Geometry::ALL[row % Geometry::ALL.len()];
     let mut entries = Entries::default();
-    let mut put = |name: &str, given: Given<'static>| {
+    let mut put = |field: Field, given: Given<'static>| {
         entries
-            .put(name, Some(given), &[])
+            .put(field.name(), Some(given), &[])
             .expect("the field is given once");
     };
-    put("geometry", Given::Text(geometry.as_str().into()));
-    for field in geometry.entry().forms[0].required {
-        let given = match field.name() {
-            "facing" => Given::Text(Facing::ALL[row / 7 % 2].as_str().into()),
-            "tilt_from_vertical" => Given::Number((row % 90) as f64),
-            _ => Given::Number(0.05 + (row % 97) as f64 * 0.02),
+    let length = 0.05 + (row % 97) as f64 * 0.02;
+    put(Field::Geometry, Given::Text(geometry.as_str().into()));
+    for &field in geometry.entry().forms[0].required {
+        let given = match field.entry().value {
+            FieldValue::Choice(words) => Given::Text(words[row / 16 % words.len()].into()),
+            FieldValue::Quantity(Kind::Angle, _) => Given::Number((row % 90) as f64),
+            _ if matches!(field, Field::Gap | Field::Spacing) => Given::Number(0.1 * length),
+            _ if field == Field::OuterDiameter => Given::Number(1.4 * length),
+            _ => Given::Number(length),
         };
-        put(field.name(), given);
+        put(field, given);
     }
-    put(
-        "surface_temperature",
-        Given::Number(320.0 + (row % 251) as f64),
-    );
-    put(
-        "ambient_temperature",
-        Given::Number(280.0 + (row % 31) as f64),
-    );
-    put("emissivity", Given::Number(0.9));
-    put("extrapolate", Given::Text("any".into()));
+    let (hot, cold) = (320.0 + (row % 251) as f64, 280.0 + (row % 31) as f64);
+    let space = geometry.entry().space;
+    match space {
+        Space::Closed => {
+            put(Field::HotTemperature, Given::Number(hot));
+            put(Field::ColdTemperature, Given::Number(cold));
+            put(Field::EmissivityHot, Given::Number(0.9));
+            put(Field::EmissivityCold, Given::Number(0.8));
+        }
+        Space::Open | Space::Channel => {
+            put(Field::SurfaceTemperature, Given::Number(hot));
+            put(Field::AmbientTemperature, Given::Number(cold));
+        }
+    }
+    if space == Space::Open {
+        put(Field::Emissivity, Given::Number(0.9));
+    }
+    put(Field::Extrapolate, Given::Text("any".into()));
     Case::read(&entries, &UnitChoice::default(), Fluids::built_in())
         .expect("the case is well-formed")
 }

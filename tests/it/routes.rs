@@ -489,3 +489,181 @@ fn a_request_keeps_its_id_when_it_is_a_short_word() {
     assert_ne!(given("two words"), "two words");
     assert_ne!(given(""), "");
 }
+
+fn glazing() -> Value {
+    json!({
+        "geometry": "vertical-cavity", "gap": "16 mm", "height": "1.4 m", "hot_temperature": "17.5 degC",
+        "cold_temperature": "2.5 degC", "emissivity_hot": 0.84, "emissivity_cold": 0.84,
+    })
+}
+
+#[test]
+fn every_body_answers_from_a_query_too() {
+    for geometry in get("/v1/geometries").json()["geometries"]
+        .as_array()
+        .unwrap()
+    {
+        let example = &geometry["example"];
+        let pairs = example.as_object().unwrap().iter().map(|(name, value)| {
+            let text = value
+                .as_str()
+                .map_or_else(|| value.to_string(), str::to_owned);
+            format!("{name}={}", text.replace(' ', "%20"))
+        });
+        let uri = format!("/v1/film?{}", pairs.collect::<Vec<_>>().join("&"));
+        let reply = get(&uri);
+        assert_eq!(reply.status, StatusCode::OK, "{uri}: {}", reply.text);
+        assert_eq!(reply.text, post(example).text);
+    }
+}
+
+#[test]
+fn a_gap_has_a_resistance_and_takes_no_surface_temperature() {
+    let answer = post(&glazing()).json();
+    let resistance = answer["thermal_resistance"].as_f64().unwrap();
+    near(&answer["total_heat_flux"], 15.0 / resistance, 1e-9);
+    assert_eq!(answer["method"], "vertical-cavity-elsherbiny");
+    let odd = with(glazing(), "surface_temperature", json!(300));
+    let one = with(odd, "emissivity_cold", Value::Null);
+    let faults = post(&one).faults();
+    let expected = [
+        (
+            "#/surface_temperature".to_owned(),
+            "unexpected-field".to_owned(),
+        ),
+        ("#/emissivity_cold".to_owned(), "missing-field".to_owned()),
+    ];
+    assert_eq!(faults, expected);
+}
+
+#[test]
+fn a_nominal_size_is_its_outside_diameter() {
+    let named = post(&with(pipe(), "diameter", json!("NPS 3"))).json();
+    assert_eq!(named["characteristic_length"], 0.0889);
+    assert_eq!(
+        post(&with(pipe(), "diameter", json!("DN 80"))).text,
+        post(&pipe()).text
+    );
+    let inches = post(&with(pipe(), "diameter", json!("3 in"))).json();
+    assert_eq!(inches["notes"][0]["code"], "nominal-size");
+    let wrong = post(&with(pipe(), "diameter", json!("DN 81"))).faults();
+    assert_eq!(
+        wrong,
+        [("#/diameter".to_owned(), "unknown-value".to_owned())]
+    );
+}
+
+#[test]
+fn a_draught_raises_the_loss() {
+    let still = post(&pipe()).json();
+    let blown = post(&with(pipe(), "draught_speed", json!("2 m/s"))).json();
+    assert_eq!(
+        blown["heat_transfer_coefficient"],
+        still["heat_transfer_coefficient"]
+    );
+    assert!(blown["combined_coefficient"].as_f64() > blown["forced_coefficient"].as_f64());
+    assert_eq!(blown["notes"][0]["code"], "draught-governs");
+    let flux = |answer: &Value| answer["total_heat_flux"].as_f64().unwrap();
+    assert!((flux(&blown) / flux(&still) - 1.53).abs() < 0.01);
+}
+
+#[test]
+fn mixtures_and_humid_air_take_their_composition() {
+    let glycol = json!({
+        "geometry": "vertical-plate", "height": 1, "fluid": "propylene-glycol-water",
+        "surface_temperature": "40 degC", "ambient_temperature": "20 degC",
+    });
+    let missing = post(&glycol).faults();
+    assert_eq!(
+        missing,
+        [("#/concentration".to_owned(), "missing-field".to_owned())]
+    );
+    assert_eq!(
+        post(&with(glycol, "concentration", json!("30 %"))).status,
+        StatusCode::OK
+    );
+    let cold = json!({
+        "geometry": "horizontal-cylinder", "diameter": 0.05, "surface_temperature": "5 degC",
+        "ambient_temperature": "20 degC", "relative_humidity": 0.7, "emissivity": 0.9,
+    });
+    assert!(post(&cold).text.contains("may-condense"));
+    let odd = with(cold, "fluid", json!("nitrogen"));
+    assert_eq!(
+        post(&odd).faults(),
+        [(
+            "#/relative_humidity".to_owned(),
+            "unexpected-field".to_owned()
+        )]
+    );
+    let state =
+        get("/v1/fluids/ethylene-glycol-water/state?temperature=20%20degC&concentration=0.3");
+    assert_eq!(state.status, StatusCode::OK, "{}", state.text);
+}
+
+fn own_oil() -> Value {
+    json!({
+        "temperature": ["20 degC", "60 degC", "100 degC"], "density": [880, 855, 830],
+        "specific_heat": [1800, 1950, "2.1 kJ/(kg K)"], "kinematic_viscosity": ["60 cSt", "15 cSt", "6 cSt"],
+        "conductivity": [0.13, 0.128, 0.126], "flash_point": "70 degC", "source": "data sheet of the supplier",
+    })
+}
+
+#[test]
+fn a_caller_brings_an_oil() {
+    let case = json!({
+        "geometry": "vertical-plate", "height": 1, "fluid": own_oil(),
+        "surface_temperature": "80 degC", "ambient_temperature": "40 degC",
+    });
+    let reply = post(&case);
+    assert_eq!(reply.status, StatusCode::OK, "{}", reply.text);
+    assert!(reply.text.contains("above-flash-point"));
+    near(
+        &reply.json()["properties"]["kinematic_viscosity"],
+        15e-6,
+        1e-12,
+    );
+    let thicker = with(
+        case.clone(),
+        "fluid",
+        with(own_oil(), "density", json!([890, 865, 840])),
+    );
+    assert_ne!(
+        post(&thicker).json()["provenance"]["case_digest"],
+        reply.json()["provenance"]["case_digest"]
+    );
+
+    let mut broken = with(own_oil(), "density", json!([880, "x", null]));
+    broken["colour"] = json!("brown");
+    broken.as_object_mut().unwrap().remove("conductivity");
+    let mut faults = post(&with(case.clone(), "fluid", broken)).faults();
+    faults.sort();
+    let expected = [
+        ("#/fluid/colour", "unknown-field"),
+        ("#/fluid/conductivity", "missing-field"),
+        ("#/fluid/density/1", "not-a-quantity"),
+        ("#/fluid/density/2", "wrong-type"),
+    ];
+    assert_eq!(faults, expected.map(|(p, c)| (p.to_owned(), c.to_owned())));
+    let falling = with(
+        own_oil(),
+        "temperature",
+        json!(["20 degC", "100 degC", "60 degC"]),
+    );
+    let faults = post(&with(case, "fluid", falling)).faults();
+    assert!(
+        faults.iter().all(
+            |(pointer, code)| pointer.starts_with("#/fluid/temperature") && code == "bad-table"
+        )
+    );
+}
+
+#[test]
+fn methods_show_how_they_were_checked() {
+    let methods = get("/v1/methods").json();
+    let all = methods["methods"].as_array().unwrap();
+    let checked = all
+        .iter()
+        .filter(|method| !method["checks"].as_array().unwrap().is_empty())
+        .count();
+    assert!(checked >= 16, "{checked}");
+}
