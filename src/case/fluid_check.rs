@@ -1,7 +1,7 @@
 //! Whether a case's temperatures and pressure lie where its fluid is known.
 
-use crate::fluids::{Conditions, Fluid, StateError};
-use crate::geometry::Field;
+use crate::fluids::{Fluid, StateError};
+use crate::geometry::{Field, Space};
 
 use super::fault::Fault;
 use super::fields::Fields;
@@ -17,7 +17,7 @@ pub(super) fn check_temperatures(
     let ambient = case.ambient_temperature;
     let (checked, what) = match case.surface {
         Surface::Temperature(surface) => {
-            check_density_maximum(surface, ambient, fluid, &case.conditions, faults);
+            check_density_maximum(case, surface, fluid, faults);
             (0.5 * (surface + ambient), "the film temperature")
         }
         Surface::HeatFlux(_) => (ambient, "the ambient temperature"),
@@ -49,7 +49,12 @@ fn blamed(fields: &Fields, error: StateError) -> Vec<Field> {
         };
         return vec![field];
     }
-    let temperatures = [Field::SurfaceTemperature, Field::AmbientTemperature];
+    let temperatures = [
+        Field::SurfaceTemperature,
+        Field::HotTemperature,
+        Field::AmbientTemperature,
+        Field::ColdTemperature,
+    ];
     let given = temperatures
         .into_iter()
         .filter(|&field| fields.is_given(field));
@@ -74,23 +79,22 @@ fn hint(field: Field, fields: &Fields) -> String {
     }
 }
 
-/// Refuses a surface and an ambient between which the buoyancy turns round.
-fn check_density_maximum(
-    surface: f64,
-    ambient: f64,
-    fluid: &Fluid,
-    conditions: &Conditions,
-    faults: &mut Vec<Fault>,
-) {
-    let Some(turn) = fluid.density_maximum(conditions) else {
+/// Refuses two temperatures between which the buoyancy turns round.
+fn check_density_maximum(case: &Case, surface: f64, fluid: &Fluid, faults: &mut Vec<Fault>) {
+    let Some(turn) = fluid.density_maximum(&case.conditions) else {
         return;
     };
+    let ambient = case.ambient_temperature;
     if surface.min(ambient) < turn && turn < surface.max(ambient) {
+        let field = match case.geometry.entry().space {
+            Space::Closed => Field::HotTemperature,
+            Space::Open | Space::Channel => Field::SurfaceTemperature,
+        };
         faults.push(Fault::at(
-            Field::SurfaceTemperature,
+            field,
             "density-maximum",
             format!(
-                "surface {surface} K and ambient {ambient} K lie on both sides of {turn:.2} K, where {} is densest: part of the layer rises and part sinks, and no method here covers that; give two temperatures on one side",
+                "{surface} K and {ambient} K lie on both sides of {turn:.2} K, where {} is densest: part of the layer rises and part sinks, and no method here covers that; give two temperatures on one side",
                 fluid.id()
             ),
         ));

@@ -55,6 +55,22 @@ def film(**changes):
     return post(FILM, {**PIPE, **changes})
 
 
+@refused(422)
+def broken_fluid_table(random):
+    """A fluid of the caller's own that is wrong in one place or another."""
+    rows = random.choice([0, 1, 2, 3, 2000])
+    table = {
+        "temperature": [300 + row for row in range(rows)],
+        "density": [900 - row for row in range(rows)],
+        "specific_heat": [2000] * rows,
+        "viscosity": [0.01] * rows,
+        "conductivity": [0.13] * rows,
+    }
+    name = random.choice(list(table))
+    table[name] = random.choice([None, "x", {}, [[]], [None], [-1, 0, 1e308], ["1 kg"] * 3, [5e-324] * 3])
+    return film(fluid=table, emissivity=None)
+
+
 def film_with(name, token):
     """The pipe with one member's value as raw bytes."""
     rest = {key: value for key, value in PIPE.items() if key != name}
