@@ -33,10 +33,32 @@ pub(super) fn surface_temperature(case: &Case, fluid: &Fluid, flux: f64) -> Resu
         eps: TOLERANCE,
         max_iter: 200,
     };
-    find_root_brent(minimum, maximum, excess, &mut convergency)
+    let (low, high) = bracket(&excess, case.ambient_temperature, minimum, maximum)
+        .ok_or(Failure::Unsolved { minimum, maximum })?;
+    find_root_brent(low, high, excess, &mut convergency)
         .ok()
         .filter(|&surface| excess(surface).abs() <= (STEP * flux.abs()).max(SMALLEST))
         .ok_or(Failure::Unsolved { minimum, maximum })
+}
+
+/// Two temperatures between which the excess changes its sign.
+///
+/// Where a cold liquid grows so thick that a colder surface takes less, both ends of the span can be on one side; the way from the ambient outwards then shows the nearer of two solutions.
+fn bracket(
+    excess: &impl Fn(f64) -> f64,
+    ambient: f64,
+    minimum: f64,
+    maximum: f64,
+) -> Option<(f64, f64)> {
+    const STEPS: i32 = 256;
+    if excess(minimum) * excess(maximum) <= 0.0 {
+        return Some((minimum, maximum));
+    }
+    let sign = excess(ambient).signum();
+    let end = if sign < 0.0 { maximum } else { minimum };
+    let at = |step: i32| ambient + (end - ambient) * (f64::from(step) / f64::from(STEPS)).powi(2);
+    let across = (1..=STEPS).find(|&step| excess(at(step)).signum() == -sign)?;
+    Some((at(across - 1), at(across)))
 }
 
 /// Surface temperatures whose reference temperatures the fluid's table holds, on the ambient's side of the greatest density.

@@ -3,7 +3,10 @@
 use crate::case::{Case, DraughtResult};
 use crate::fluids::{Fluid, State, StateError};
 use crate::geometry::{Extrapolate, Facing, Geometry};
-use crate::methods::{Groups, MethodId, RangeStatus, ReferenceTemperature, Side, Verdict, choose};
+use crate::methods::{
+    Groups, MethodId, RangeStatus, ReferenceTemperature, Side, Verdict, choose, neighbour,
+    step_of_ends,
+};
 
 use super::draught::combine;
 use super::failure::Failure;
@@ -145,12 +148,17 @@ impl<'a> Layer<'a> {
             .filter_map(|&id| self.enter(id).ok())
     }
 
-    /// The method that the automatic choice would take just across the edge of a range, if that is near.
-    pub fn neighbour(&self, chosen: MethodId) -> Option<Entered> {
-        self.automatic().find(|entered| {
-            let verdict = entered.verdict;
-            entered.id != chosen && !verdict.usable && verdict.status == RangeStatus::Near
-        })
+    /// How far the chosen method is from the one that takes over just across the edge of a range, less one; 0 away from edges.
+    pub fn step(&self, chosen: &Entered, coefficient: f64) -> f64 {
+        if self.case.method.is_some() {
+            return 0.0;
+        }
+        let others = self.automatic().filter(|other| other.id != chosen.id);
+        match neighbour(others, |other| other.verdict, &chosen.verdict) {
+            Some(other) => coefficient / other.result(self.case).1 - 1.0,
+            None if chosen.id == MethodId::TiltedLayerCatton => step_of_ends(&chosen.groups),
+            None => 0.0,
+        }
     }
 
     /// What the case's draught makes of a free coefficient.

@@ -133,7 +133,7 @@ fn answer(case: &Case, fluid: &Fluid, wanted: Wanted) -> Outcome {
             .fraction(matches!(regime, Regime::Conduction | Regime::Laminar)),
         low: spread.map(|(low, _)| low),
         high: spread.map(|(_, high)| high),
-        method_step: method_step(case, &layer, &entered, coefficient),
+        method_step: layer.step(&entered, coefficient),
         notes: Notes::default(),
         state: entered.state,
     };
@@ -169,16 +169,6 @@ fn surface_temperature_max(case: &Case, difference: f64) -> Option<f64> {
     }
 }
 
-/// How far the automatic choice is from the method that takes over just across the edge of a range.
-fn method_step(case: &Case, layer: &Layer, entered: &Entered, coefficient: f64) -> f64 {
-    if case.method.is_some() {
-        return 0.0;
-    }
-    layer.neighbour(entered.id).map_or(0.0, |neighbour| {
-        coefficient / neighbour.result(case).1 - 1.0
-    })
-}
-
 /// What moves in a layer, by the bounds that the methods' sources use.
 fn regime(case: &Case, side: Side, entered: &Entered, nusselt: f64) -> Regime {
     let groups = &entered.groups;
@@ -208,7 +198,7 @@ fn regime(case: &Case, side: Side, entered: &Entered, nusselt: f64) -> Regime {
         }
     };
     let still = match case.geometry.entry().space {
-        Space::Closed => nusselt <= 1.0,
+        Space::Closed => nusselt < notes::CONDUCTION,
         Space::Open | Space::Channel => rayleigh < 1.0,
     };
     if still {

@@ -23,6 +23,8 @@ const DENSITY_MAXIMUM_SPAN: f64 = 6.0;
 const PLAUSIBLE_AMBIENT: std::ops::RangeInclusive<f64> = 220.0..=350.0;
 /// Contact for hours can burn from here, K: ISO 13732-1, 43 degrees Celsius (from memory).
 const BURNS_FROM: f64 = 316.15;
+/// A gap whose Nusselt number is below this conducts.
+pub(super) const CONDUCTION: f64 = 1.01;
 /// A step between neighbouring methods smaller than this is not told.
 const STEP: f64 = 0.01;
 /// Below this Richardson number a draught is not small (common practice).
@@ -89,7 +91,7 @@ fn method_notes(case: &Case, entered: &Entered, answer: &Answer, notes: &mut Not
     notes.add_if(!moves, NoteCode::EqualTemperatures);
     let closed = case.geometry.entry().space == Space::Closed;
     notes.add_if(
-        moves && closed && answer.nusselt <= 1.0,
+        moves && closed && answer.nusselt < CONDUCTION,
         NoteCode::PureConduction,
     );
     if let Some(draught) = answer.draught {

@@ -287,6 +287,27 @@ impl Range {
         }
     }
 
+    /// How far outside a value is, 1 at the edge of what is near.
+    fn distance(&self, value: f64) -> f64 {
+        let (low, high) = if value < self.minimum {
+            (value, self.minimum)
+        } else {
+            (self.maximum, value)
+        };
+        match self.quantity {
+            Quantity::Rayleigh
+            | Quantity::RayleighAlong
+            | Quantity::RayleighWeighted
+            | Quantity::RayleighChannel
+            | Quantity::DiameterGrashof => (high / low).log10(),
+            Quantity::Prandtl | Quantity::Curvature | Quantity::Aspect => {
+                (high / low).ln() / 1.5_f64.ln()
+            }
+            Quantity::Tilt | Quantity::LayerTilt => (high - low) / 5.0,
+            Quantity::HeatedWalls => f64::INFINITY,
+        }
+    }
+
     /// Whether a value outside lies on a side that is answered all the same.
     fn is_answered(&self, value: f64) -> bool {
         value < self.minimum && self.answered_below || value > self.maximum && self.answered_above
@@ -316,12 +337,12 @@ fn shown(value: f64) -> String {
 }
 
 /// Where a case lies to all ranges of a method.
-#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+#[derive(Clone, Copy, Debug, PartialEq)]
 pub struct Verdict {
     /// The worst of all.
     pub status: RangeStatus,
-    /// Nothing is outside but on sides that are answered all the same.
-    pub usable: bool,
+    /// How far the case is outside, 1 at the edge of what is near; 0 inside and on sides that are answered all the same.
+    pub distance: f64,
     /// A Rayleigh number is too small.
     pub rayleigh_below: bool,
     /// A Rayleigh number is too large.
@@ -337,7 +358,7 @@ impl Verdict {
     pub fn of(ranges: &[Range], groups: &Groups) -> Self {
         let mut verdict = Verdict {
             status: RangeStatus::Within,
-            usable: true,
+            distance: 0.0,
             rayleigh_below: false,
             rayleigh_above: false,
             prandtl_outside: false,
@@ -350,7 +371,9 @@ impl Verdict {
                 continue;
             }
             verdict.status = verdict.status.max(status);
-            verdict.usable &= range.is_answered(value);
+            if !range.is_answered(value) {
+                verdict.distance = verdict.distance.max(range.distance(value));
+            }
             match range.quantity.aspect() {
                 Aspect::Rayleigh if value < range.minimum => verdict.rayleigh_below = true,
                 Aspect::Rayleigh => verdict.rayleigh_above = true,

@@ -30,10 +30,11 @@ use std::sync::LazyLock;
 use crate::digest::sha256;
 use crate::geometry::{Geometry, choice};
 
-pub use choice::choose;
+pub use choice::{choose, neighbour};
 pub use entry::{Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source};
 pub use evidence::{Evidence, evidence};
 pub use groups::{Groups, Quantity, Range, RangeStatus, Verdict};
+pub use tilted_layer::step_of_ends;
 pub use vertical_cylinder::curvature_factor;
 
 macro_rules! registry {
@@ -174,13 +175,17 @@ fn listed(geometry: Geometry, heating: Heating, side: Side) -> Vec<MethodId> {
     MethodId::ALL.iter().copied().filter(serves).collect()
 }
 
+/// The methods of an isothermal body's automatic choice.
+fn automatic(geometry: Geometry, side: Side) -> impl Iterator<Item = &'static Method> {
+    let methods = MethodId::serving(geometry, Heating::Isothermal, side).iter();
+    methods
+        .map(|id| id.method())
+        .filter(|method| method.automatic)
+}
+
 /// Nusselt number of an isothermal body by the automatic choice.
 fn automatic_nusselt(geometry: Geometry, side: Side, groups: &Groups) -> f64 {
-    let methods = MethodId::serving(geometry, Heating::Isothermal, side).iter();
-    let automatic = methods
-        .map(|id| id.method())
-        .filter(|method| method.automatic);
-    choose(automatic, |method| method.verdict(groups))
+    choose(automatic(geometry, side), |method| method.verdict(groups))
         .map_or(1.0, |method| (method.nusselt)(groups))
 }
 

@@ -2,7 +2,6 @@
 
 use crate::geometry::Geometry::{self, TiltedLayer};
 
-use super::automatic_nusselt;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
@@ -10,6 +9,7 @@ use super::groups::{Groups, Quantity, Range};
 use super::horizontal_layer::{GASES, gas_layer};
 use super::sources::EN_673;
 use super::vertical_cavity;
+use super::{automatic, automatic_nusselt, choose, neighbour};
 
 pub static HOLLANDS_UNNY_RAITHBY_KONICEK: Method = Method {
     geometry: TiltedLayer,
@@ -57,7 +57,7 @@ pub static ELSHERBINY: Method = Method {
     ranges: &[
         Range::between(Quantity::Rayleigh, 1e2, 2e7).answered_below(),
         Range::between(Quantity::LayerTilt, 60.0, 90.0),
-        Range::between(Quantity::Aspect, 5.0, 110.0),
+        Range::between(Quantity::Aspect, 5.0, 110.0).answered_above(),
         GASES,
     ],
     reference: ReferenceTemperature::Film,
@@ -106,19 +106,44 @@ pub static CATTON: Method = Method {
     nusselt: |g| {
         let level = automatic_nusselt(Geometry::HorizontalLayer, Side::Unstable, g);
         let upright = automatic_nusselt(Geometry::VerticalCavity, Side::Any, g);
-        let critical = critical_tilt(g.aspect);
-        let sine = g.tilt.to_radians().sin();
-        let nusselt = if g.tilt <= critical {
-            let share = g.tilt / critical;
-            level * (upright / level).powf(share) * critical.to_radians().sin().powf(0.25 * share)
-        } else if g.tilt <= 90.0 {
-            upright * sine.powf(0.25)
-        } else {
-            1.0 + (upright - 1.0) * sine
-        };
-        nusselt.max(1.0)
+        between(level, upright, g)
     },
 };
+
+/// Catton's rule between the Nusselt numbers of the level and the upright layer.
+fn between(level: f64, upright: f64, g: &Groups) -> f64 {
+    let critical = critical_tilt(g.aspect);
+    let sine = g.tilt.to_radians().sin();
+    let nusselt = if g.tilt <= critical {
+        let share = g.tilt / critical;
+        level * (upright / level).powf(share) * critical.to_radians().sin().powf(0.25 * share)
+    } else if g.tilt <= 90.0 {
+        upright * sine.powf(0.25)
+    } else {
+        1.0 + (upright - 1.0) * sine
+    };
+    nusselt.max(1.0)
+}
+
+/// How far Catton's rule steps close by, less one, where a method of its two ends takes over from another; 0 away from such places.
+pub fn step_of_ends(g: &Groups) -> f64 {
+    let ends = [
+        (Geometry::HorizontalLayer, Side::Unstable),
+        (Geometry::VerticalCavity, Side::Any),
+    ];
+    let here = ends.map(|(geometry, side)| automatic_nusselt(geometry, side, g));
+    let across = ends.map(|(geometry, side)| {
+        let judge = |method: &&'static Method| method.verdict(g);
+        let chosen = choose(automatic(geometry, side), judge)?;
+        let others = automatic(geometry, side).filter(|other| !std::ptr::eq(*other, chosen));
+        neighbour(others, judge, &chosen.verdict(g)).map(|other| (other.nusselt)(g))
+    });
+    if across == [None, None] {
+        return 0.0;
+    }
+    let [level, upright] = [0, 1].map(|end| across[end].unwrap_or(here[end]));
+    between(here[0], here[1], g) / between(level, upright, g) - 1.0
+}
 
 pub static GLAZING: Method = Method {
     geometry: TiltedLayer,

@@ -40,12 +40,12 @@ pub static ELSHERBINY: Method = Method {
     source: ELSHERBINY_SOURCE,
     ranges: &[
         Range::between(Quantity::Rayleigh, 1e2, 2e7).answered_below(),
-        Range::between(Quantity::Aspect, 5.0, 110.0),
+        Range::between(Quantity::Aspect, 5.0, 110.0).answered_above(),
         GASES,
     ],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
-    remark: "",
+    remark: "Above H/L 110, where no method exists, it is the nearest.",
     example: Example {
         groups: Groups::new(1e5, 0.71).with_aspect(20.0),
         nusselt: 3.00238,
@@ -164,8 +164,8 @@ pub static WRIGHT: Method = Method {
     source: Source {
         authors: "Wright, J. L.",
         year: 1996,
-        work: "ASHRAE Transactions 102, also ISO 15099",
-        locator: "801-806",
+        work: "ASHRAE Transactions 102 (1), also ISO 15099",
+        locator: "940-946 (from memory)",
     },
     ranges: &[
         Range::between(Quantity::Rayleigh, 0.0, 1e6),

@@ -1,5 +1,7 @@
 //! The library and the routes, checked from outside.
 
+mod agreement;
+mod bodies;
 mod continuity;
 mod layering;
 mod openapi;

@@ -2,8 +2,8 @@
 
 use plumeline::case::{Answer, Case, Entries, Fault, Given, Wanted};
 use plumeline::film::{Outcome, evaluate};
-use plumeline::fluids::Fluids;
-use plumeline::geometry::Field;
+use plumeline::fluids::{Composition, Fluid, Fluids};
+use plumeline::geometry::{Field, Geometry, Space};
 use plumeline::quantity::{Kind, UnitChoice};
 use serde_json::{Map, Value};
 
@@ -20,6 +20,11 @@ pub fn request(value: Value) -> Request {
 
 /// Makes a case of a request.
 pub fn read(request: &Request) -> Result<Case, Vec<Fault>> {
+    read_among(request, Fluids::built_in())
+}
+
+/// Makes a case of a request that may name any of some fluids.
+pub fn read_among(request: &Request, fluids: &Fluids) -> Result<Case, Vec<Fault>> {
     let mut entries = Entries::default();
     let mut units = UnitChoice::default();
     let mut faults = Vec::new();
@@ -30,7 +35,7 @@ pub fn read(request: &Request) -> Result<Case, Vec<Fault>> {
             faults.push(fault);
         }
     }
-    match Case::read(&entries, &units, Fluids::built_in()) {
+    match Case::read(&entries, &units, fluids) {
         Ok(case) if faults.is_empty() => Ok(case),
         Ok(_) => Err(faults),
         Err(found) => Err(faults.into_iter().chain(found).collect()),
@@ -50,13 +55,13 @@ pub fn outcome(case: &Case) -> Outcome {
 
 /// The outcome of one case as far as it is wanted.
 pub fn outcome_of(case: &Case, wanted: Wanted) -> Outcome {
+    outcome_among(case, wanted, Fluids::built_in())
+}
+
+/// The outcome of one case in one of some fluids.
+pub fn outcome_among(case: &Case, wanted: Wanted, fluids: &Fluids) -> Outcome {
     let mut outcomes = Vec::with_capacity(1);
-    evaluate(
-        std::slice::from_ref(case),
-        Fluids::built_in(),
-        wanted,
-        &mut outcomes,
-    );
+    evaluate(std::slice::from_ref(case), fluids, wanted, &mut outcomes);
     outcomes.pop().expect("one outcome a case")
 }
 
@@ -88,16 +93,44 @@ fn chosen_units(value: &Value) -> UnitChoice {
     UnitChoice::parse_pairs(pairs, &kinds).unwrap_or_else(|faults| panic!("{faults:#?}"))
 }
 
+/// The composition of a fluid that a check takes where it says nothing of it: the middle of a
+/// mixture's mass fractions, a pure fluid's and dry air's otherwise.
+pub fn middle_composition(fluid: &Fluid) -> f64 {
+    match *fluid.composition() {
+        Composition::MassFraction {
+            minimum, maximum, ..
+        } => 0.5 * (minimum + maximum),
+        Composition::Pure | Composition::Humidity => 0.0,
+    }
+}
+
 /// A case under construction, bare numbers in SI.
 #[derive(Clone, Debug)]
-pub struct Draft(Vec<(&'static str, Given<'static>)>);
+pub struct Draft {
+    geometry: Geometry,
+    fields: Vec<(&'static str, Given<'static>)>,
+}
 
 impl Draft {
-    /// A body in a fluid.
-    pub fn new(geometry: &'static str, fluid: &'static str) -> Self {
-        Draft(Vec::new())
-            .word("geometry", geometry)
-            .word("fluid", fluid)
+    /// A body in a fluid, a mixture of the middle composition.
+    pub fn new(geometry: Geometry, fluid: &'static str) -> Self {
+        let draft = Draft {
+            geometry,
+            fields: Vec::new(),
+        };
+        let draft = draft
+            .word("geometry", geometry.as_str())
+            .word("fluid", fluid);
+        let id = Fluids::built_in().find(fluid).expect("a built-in fluid");
+        match middle_composition(Fluids::built_in().get(id)) {
+            0.0 => draft,
+            middle => draft.number("concentration", middle),
+        }
+    }
+
+    /// The body.
+    pub fn geometry(&self) -> Geometry {
+        self.geometry
     }
 
     /// The same with a field that holds a word; the last one given counts.
@@ -110,6 +143,27 @@ impl Draft {
         self.with(name, Given::Number(number))
     }
 
+    /// The same with several fields that hold numbers.
+    pub fn numbers(self, numbers: &[(&'static str, f64)]) -> Self {
+        numbers
+            .iter()
+            .fold(self, |draft, &(name, number)| draft.number(name, number))
+    }
+
+    /// The same between two temperatures, K: of surface and ambient, or of the two sides of a
+    /// gap, where the order does not matter.
+    pub fn between(&self, surface: f64, ambient: f64) -> Self {
+        let draft = self.clone();
+        match self.geometry.entry().space {
+            Space::Closed => draft
+                .number("hot_temperature", surface.max(ambient))
+                .number("cold_temperature", surface.min(ambient)),
+            Space::Open | Space::Channel => draft
+                .number("surface_temperature", surface)
+                .number("ambient_temperature", ambient),
+        }
+    }
+
     /// The same with every number written as `text` has it; none leaves it as it is.
     pub fn rewritten(&self, text: impl Fn(&str, f64) -> Option<String>) -> Self {
         let rewrite = |(name, given): &(&'static str, Given<'static>)| match given {
@@ -119,13 +173,16 @@ impl Draft {
             },
             _ => (*name, given.clone()),
         };
-        Draft(self.0.iter().map(rewrite).collect())
+        Draft {
+            fields: self.fields.iter().map(rewrite).collect(),
+            ..*self
+        }
     }
 
     /// The case.
     pub fn read(&self) -> Result<Case, Vec<Fault>> {
         let mut entries = Entries::default();
-        for (name, given) in &self.0 {
+        for (name, given) in &self.fields {
             entries
                 .put(name, Some(given.clone()), &[])
                 .expect("a field that is not given twice");
@@ -134,76 +191,11 @@ impl Draft {
     }
 
     fn with(mut self, name: &'static str, given: Given<'static>) -> Self {
-        self.0.retain(|(known, _)| *known != name);
-        self.0.push((name, given));
+        self.fields.retain(|(known, _)| *known != name);
+        self.fields.push((name, given));
         self
     }
 }
 
 /// What to do outside ranges, the boldest last.
 pub const EXTRAPOLATE: [&str; 3] = ["none", "near", "any"];
-
-/// A body with one size, to be scaled.
-pub struct Body {
-    /// Its geometry.
-    pub geometry: &'static str,
-    /// Its dimensions, m, and the angle of an inclined plate.
-    pub dimensions: &'static [(&'static str, f64)],
-    /// The side of a plate.
-    pub facing: Option<&'static str>,
-}
-
-/// Every open body, plates with either side to the fluid.
-pub const BODIES: [Body; 8] = [
-    body("vertical-plate", &[("height", 1.0), ("width", 0.7)], None),
-    body("inclined-plate", LEANING, Some("up")),
-    body("inclined-plate", LEANING, Some("down")),
-    body("horizontal-plate", LEVEL, Some("up")),
-    body("horizontal-plate", LEVEL, Some("down")),
-    body(
-        "horizontal-cylinder",
-        &[("diameter", 0.1), ("length", 3.0)],
-        None,
-    ),
-    body(
-        "vertical-cylinder",
-        &[("diameter", 0.2), ("height", 1.0)],
-        None,
-    ),
-    body("sphere", &[("diameter", 0.2)], None),
-];
-
-const LEANING: &[(&str, f64)] = &[("length", 1.0), ("width", 0.7), (TILT, 40.0)];
-const LEVEL: &[(&str, f64)] = &[("length", 1.0), ("width", 0.7)];
-const TILT: &str = "tilt_from_vertical";
-
-const fn body(
-    geometry: &'static str,
-    dimensions: &'static [(&'static str, f64)],
-    facing: Option<&'static str>,
-) -> Body {
-    Body {
-        geometry,
-        dimensions,
-        facing,
-    }
-}
-
-impl Body {
-    /// The body in a fluid, all lengths times a factor.
-    pub fn draft(&self, fluid: &'static str, scale: f64) -> Draft {
-        let draft = Draft::new(self.geometry, fluid);
-        let faced = match self.facing {
-            Some(facing) => draft.word("facing", facing),
-            None => draft,
-        };
-        self.dimensions.iter().fold(faced, |draft, &(name, value)| {
-            draft.number(name, if name == TILT { value } else { value * scale })
-        })
-    }
-
-    /// Its name in a failure.
-    pub fn label(&self) -> String {
-        format!("{} {}", self.geometry, self.facing.unwrap_or_default())
-    }
-}

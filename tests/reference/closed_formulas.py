@@ -103,7 +103,7 @@ def cavity_macgregor_emery_turbulent(g):
 
 
 def cavity_wright(g):
-    """Wright 1996, ASHRAE Trans. 102 (1), 819-823; ISO 15099."""
+    """Wright 1996, ASHRAE Trans. 102 (1), 940-946; ISO 15099."""
     rayleigh = g.rayleigh
     if rayleigh <= 1e4:
         high = 1.0 + 1.7596678e-10 * rayleigh**2.2984755
@@ -116,8 +116,8 @@ def cavity_wright(g):
 
 # The automatic choice, for the two ends of Catton's tilted layer.
 
-# One decade in Ra and a factor of 1.5 in Pr and in aspect still count as near.
-NEAR = {"rayleigh": 10.0, "catton_rayleigh": 10.0, "prandtl": 1.5, "aspect": 1.5}
+# What counts as one step away from a range: a decade in Ra, a factor of 1.5 in Pr and in aspect.
+STEPS = {"rayleigh": 10.0, "catton_rayleigh": 10.0, "prandtl": 1.5, "aspect": 1.5}
 
 
 @dataclass(frozen=True)
@@ -127,15 +127,19 @@ class Candidate:
     nusselt: Callable
     ranges: dict
 
-    def fits(self, g, margins):
+    def distance(self, g):
+        """How many steps outside its ranges a case is; none on an answered side."""
+        farthest = 0.0
         for name, (low, high, answered_below, answered_above) in self.ranges.items():
             value = catton_rayleigh(g) if name == "catton_rayleigh" else getattr(g, name)
-            margin = margins.get(name, 1.0)
-            if value < low / margin and not answered_below:
-                return False
-            if value > high * margin and not answered_above:
-                return False
-        return True
+            if value < low and not answered_below:
+                ratio = low / value if value > 0.0 else math.inf
+            elif value > high and not answered_above:
+                ratio = value / high
+            else:
+                continue
+            farthest = max(farthest, math.log(ratio) / math.log(STEPS[name]))
+        return farthest
 
 
 def candidate(nusselt, **ranges):
@@ -143,12 +147,8 @@ def candidate(nusselt, **ranges):
 
 
 def first_fit(candidates, g):
-    """The first formula within its ranges, else the first near them, else the first."""
-    for margins in ({}, NEAR):
-        for one in candidates:
-            if one.fits(g, margins):
-                return one.nusselt(g)
-    return candidates[0].nusselt(g)
+    """The formula whose ranges the case is least outside of, the earlier of equals."""
+    return min(candidates, key=lambda one: one.distance(g)).nusselt(g)
 
 
 def within(low, high, answered_below=False, answered_above=False):
@@ -164,13 +164,14 @@ CAVITIES = (
     candidate(
         cavity_elsherbiny,
         prandtl=within(0.6, 1.1),
-        aspect=within(5.0, 110.0),
+        aspect=within(5.0, 110.0, answered_above=True),
         rayleigh=within(1e2, 2e7, answered_below=True),
     ),
     candidate(
         cavity_berkovsky_polevikov,
         aspect=within(1.0, 2.0, answered_below=True),
         catton_rayleigh=within(1e3, math.inf, answered_below=True),
+        rayleigh=within(0.0, 1e10),
     ),
     candidate(
         cavity_catton,

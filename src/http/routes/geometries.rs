@@ -4,6 +4,7 @@ use axum::http::HeaderMap;
 use axum::response::Response;
 use serde::Serialize;
 use utoipa::ToSchema;
+use utoipa::openapi::{ObjectBuilder, Type};
 
 use crate::geometry::{Field, FieldValue, Geometry, GeometryEntry};
 use crate::http::extract::AcceptsJson;
@@ -42,8 +43,15 @@ pub struct GeometryView {
     /// Fields that may be given.
     optional: Vec<FieldView>,
     /// An example request.
-    #[schema(value_type = Object, example = json!({"geometry": "sphere"}))]
+    #[schema(schema_with = example_schema)]
     example: serde_json::Value,
+}
+
+fn example_schema() -> ObjectBuilder {
+    ObjectBuilder::new()
+        .schema_type(Type::Object)
+        .description(Some("An example request."))
+        .examples([example_request(Geometry::Sphere)])
 }
 
 /// One way to give a body's size.

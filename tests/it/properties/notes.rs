@@ -1,12 +1,12 @@
 //! Every note, by a case that earns it and a near one that does not.
 
-use plumeline::case::{NoteCode, Severity};
+use plumeline::case::{NoteCode, Severity, Wanted};
 use plumeline::film::note;
-use plumeline::fluids::Fluids;
+use plumeline::fluids::{Fluid, Fluids, OwnTable};
 use serde_json::{Value, json};
 
-use super::requests::{ball, bath, lid, pipe, riser, slope, wall, with};
-use crate::support::{answer, case};
+use super::requests::{attic, ball, bath, glazing, lid, pipe, riser, slope, wall, with};
+use crate::support::{answer, case, outcome_among, read_among, request};
 
 /// A code, a base, what earns the note and what does not.
 type Row = (NoteCode, Value, Value, Value);
@@ -42,7 +42,13 @@ fn rows() -> Vec<Row> {
             json!({"tilt_from_vertical": 61}),
             json!({"tilt_from_vertical": 60}),
         ),
-        (MethodStep, ball(), json!({"diameter": "10 m"}), json!({})),
+        (MethodStep, ball(), json!({"diameter": "5 m"}), json!({})),
+        (
+            MethodStep,
+            glazing(),
+            json!({"gap": "0.51 m", "height": "1 m"}),
+            json!({"gap": "0.8 m", "height": "1 m"}),
+        ),
         (
             Transition,
             wall(),
@@ -54,6 +60,54 @@ fn rows() -> Vec<Row> {
             wall(),
             json!({"height": "1 m"}),
             json!({"height": "4 m"}),
+        ),
+        (
+            ShapeOutsideRange,
+            glazing(),
+            json!({"gap": "1.2 m", "height": "1 m"}),
+            json!({"gap": "1 m", "height": "1 m"}),
+        ),
+        (
+            PureConduction,
+            attic(),
+            json!({"heated_from": "above"}),
+            json!({}),
+        ),
+        (
+            PureConduction,
+            attic(),
+            json!({"gap": "9 mm"}),
+            json!({"gap": "12 mm"}),
+        ),
+        (
+            DraughtMatters,
+            pipe(),
+            json!({"draught_speed": "0.1 m/s"}),
+            json!({"draught_speed": "0.05 m/s"}),
+        ),
+        (
+            DraughtMatters,
+            pipe(),
+            json!({"draught_speed": "0.5 m/s"}),
+            json!({"draught_speed": "1 m/s"}),
+        ),
+        (
+            DraughtGoverns,
+            pipe(),
+            json!({"draught_speed": "1 m/s"}),
+            json!({"draught_speed": "0.5 m/s"}),
+        ),
+        (
+            Confined,
+            pipe(),
+            json!({"clearance": "10 mm"}),
+            json!({"clearance": "20 mm"}),
+        ),
+        (
+            NominalSize,
+            pipe(),
+            json!({"diameter": "3 in"}),
+            json!({"diameter": "NPS 3"}),
         ),
         (
             ThinCylinder,
@@ -131,6 +185,21 @@ fn rows() -> Vec<Row> {
             json!({"surface_temperature": "101 degC"}),
         ),
         (
+            MayCondense,
+            with(&pipe(), &json!({"relative_humidity": 0.6})),
+            json!({"surface_temperature": "10 degC"}),
+            json!({"surface_temperature": "14 degC"}),
+        ),
+        (
+            MayFreeze,
+            with(
+                &bath(),
+                &json!({"fluid": "ethylene-glycol-water", "concentration": 0.3, "ambient_temperature": "0 degC"}),
+            ),
+            json!({"surface_temperature": "-20 degC"}),
+            json!({"surface_temperature": "-5 degC"}),
+        ),
+        (
             MayFreeze,
             bath(),
             json!({"surface_temperature": "-1 degC", "ambient_temperature": "3 degC"}),
@@ -155,6 +224,18 @@ fn rows() -> Vec<Row> {
             json!({"surface_temperature": 230, "ambient_temperature": "200 K"}),
         ),
         (
+            IdealGasFallback,
+            with(&pipe(), &json!({"fluid": "argon"})),
+            json!({"pressure": "1.1 bar"}),
+            json!({}),
+        ),
+        (
+            RoughExpansion,
+            bath(),
+            json!({"fluid": "rough-oil"}),
+            json!({"fluid": "smooth-oil"}),
+        ),
+        (
             TableEdge,
             pipe(),
             json!({"surface_temperature": "156 K", "ambient_temperature": "154 K"}),
@@ -169,22 +250,42 @@ fn rows() -> Vec<Row> {
     ]
 }
 
+/// The built-in fluids and two of a caller's, one with densities that were rounded to tens.
+fn fluids() -> Fluids {
+    let oil = |id: &str, density: [f64; 5]| OwnTable {
+        id: id.to_owned(),
+        temperature: vec![280.0, 300.0, 320.0, 340.0, 360.0],
+        density: density.to_vec(),
+        specific_heat: vec![1900.0, 1980.0, 2060.0, 2140.0, 2220.0],
+        viscosity: Some(vec![0.2, 0.08, 0.035, 0.018, 0.01]),
+        conductivity: vec![0.135, 0.133, 0.131, 0.129, 0.127],
+        ..OwnTable::default()
+    };
+    let smooth = oil("smooth-oil", [882.0, 869.2, 856.4, 843.6, 830.8]);
+    let rough = oil("rough-oil", [880.0, 870.0, 860.0, 840.0, 830.0]);
+    [smooth, rough]
+        .into_iter()
+        .map(|table| Fluid::from_own(table).unwrap_or_else(|faults| panic!("{faults:#?}")))
+        .fold(Fluids::built_in().clone(), |fluids, oil| {
+            fluids.with_own(oil).0
+        })
+}
+
 #[test]
 fn every_note_is_earned_by_one_case_and_not_by_the_next() {
+    let fluids = fluids();
     let mut failures = Vec::new();
     for (code, base, earns, quiet) in rows() {
         for (changes, expected) in [(&earns, true), (&quiet, false)] {
-            let case = case(with(&base, changes));
-            let answer = answer(&case);
+            let case = read_among(&request(with(&base, changes)), &fluids)
+                .unwrap_or_else(|faults| panic!("{changes}: {faults:#?}"));
+            let answer = outcome_among(&case, Wanted::ALL, &fluids)
+                .unwrap_or_else(|failure| panic!("{changes}: {failure:?}"));
             if answer.notes.contains(code) != expected {
                 let found: Vec<_> = answer.notes.iter().collect();
                 failures.push(format!("{code:?} {changes}: {found:?}"));
             }
-            if expected
-                && note(code, &case, &answer, Fluids::built_in())
-                    .text
-                    .is_empty()
-            {
+            if expected && note(code, &case, &answer, &fluids).text.is_empty() {
                 failures.push(format!("{code:?}: no words"));
             }
         }
@@ -196,6 +297,26 @@ fn every_note_is_earned_by_one_case_and_not_by_the_next() {
         }
     }
     assert!(failures.is_empty(), "{}", failures.join("\n"));
+}
+
+/// Where an opposing draught is as strong as the rising air, no value between nothing and the
+/// larger of the two is safe.
+#[test]
+fn a_draught_that_cancels_free_convection_is_a_warning() {
+    let case = case(with(
+        &wall(),
+        &json!({"draught_speed": "1.7 m/s", "draught_direction": "opposing"}),
+    ));
+    let answer = answer(&case);
+    let draught = answer.draught.expect("a draught");
+    assert!(draught.cancels, "{draught:?}");
+    let note = note(NoteCode::DraughtMatters, &case, &answer, Fluids::built_in());
+    assert_eq!(note.severity, Severity::Warning);
+    assert_eq!(answer.low, Some(0.0));
+    let larger = draught
+        .forced_coefficient
+        .max(answer.heat_transfer_coefficient);
+    assert_eq!(answer.high, Some(larger));
 }
 
 /// 43, 51 and 60 degrees Celsius, at which contact burns in hours, in a minute, and guards are asked for.

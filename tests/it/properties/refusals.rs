@@ -3,7 +3,7 @@
 use plumeline::fluids::Fluids;
 use serde_json::json;
 
-use super::requests::{bath, lid, pipe, wall, with};
+use super::requests::{attic, bath, fins, glazing, jacket, lid, pipe, wall, with};
 use crate::support::{outcome, read, request};
 
 #[test]
@@ -105,6 +105,144 @@ fn what_has_no_answer_is_refused_by_name() {
             json!({"height": "15 m", "extrapolate": "none", "method": "vertical-plate-raithby-hollands"}),
             "outside-method-range",
             "#/method",
+        ),
+        (
+            glazing(),
+            json!({"hot_temperature": "0 degC"}),
+            "conflicting-fields",
+            "#/hot_temperature",
+        ),
+        (
+            glazing(),
+            json!({"hot_temperature": 60, "cold_temperature": 20}),
+            "outside-table",
+            "#/hot_temperature",
+        ),
+        (
+            glazing(),
+            json!({"hot_temperature": 60, "cold_temperature": 20}),
+            "outside-table",
+            "#/cold_temperature",
+        ),
+        (
+            glazing(),
+            json!({"fluid": "water", "emissivity_hot": null, "emissivity_cold": null, "cold_temperature": "2 degC"}),
+            "density-maximum",
+            "#/hot_temperature",
+        ),
+        (
+            glazing(),
+            json!({"fluid": "water"}),
+            "unexpected-field",
+            "#/emissivity_cold",
+        ),
+        (
+            glazing(),
+            json!({"emissivity_cold": null}),
+            "missing-field",
+            "#/emissivity_cold",
+        ),
+        (
+            glazing(),
+            json!({"heat_flux": "10 W/m2"}),
+            "unexpected-field",
+            "#/heat_flux",
+        ),
+        (
+            glazing(),
+            json!({"draught_speed": "1 m/s"}),
+            "unexpected-field",
+            "#/draught_speed",
+        ),
+        (
+            glazing(),
+            json!({"method": "vertical-cavity-berkovsky-polevikov"}),
+            "outside-method-range",
+            "#/method",
+        ),
+        (
+            attic(),
+            json!({"heated_from": null}),
+            "missing-field",
+            "#/heated_from",
+        ),
+        (
+            attic(),
+            json!({"heated_from": "left"}),
+            "unknown-value",
+            "#/heated_from",
+        ),
+        (
+            attic(),
+            json!({"method": "horizontal-layer-conduction"}),
+            "method-does-not-fit",
+            "#/method",
+        ),
+        (
+            jacket(),
+            json!({"outer_diameter": "50 mm"}),
+            "conflicting-fields",
+            "#/outer_diameter",
+        ),
+        (
+            fins(),
+            json!({"emissivity": 0.9}),
+            "unexpected-field",
+            "#/emissivity",
+        ),
+        (
+            fins(),
+            json!({"heated_walls": null}),
+            "missing-field",
+            "#/heated_walls",
+        ),
+        (
+            pipe(),
+            json!({"draught_direction": "across"}),
+            "missing-field",
+            "#/draught_speed",
+        ),
+        (
+            pipe(),
+            json!({"diameter": "DN 81"}),
+            "unknown-value",
+            "#/diameter",
+        ),
+        (
+            bath(),
+            json!({"fluid": "ethylene-glycol-water"}),
+            "missing-field",
+            "#/concentration",
+        ),
+        (
+            bath(),
+            json!({"fluid": "ethylene-glycol-water", "concentration": 0.9}),
+            "outside-table",
+            "#/concentration",
+        ),
+        (
+            bath(),
+            json!({"concentration": 0.3}),
+            "unexpected-field",
+            "#/concentration",
+        ),
+        (
+            bath(),
+            json!({"relative_humidity": 0.5}),
+            "unexpected-field",
+            "#/relative_humidity",
+        ),
+        (
+            pipe(),
+            json!({"relative_humidity": 1, "ambient_temperature": "120 degC", "surface_temperature": "130 degC"}),
+            "outside-table",
+            "#/relative_humidity",
+        ),
+        (
+            bath(),
+            json!({"fluid": "ethylene-glycol-water", "concentration": 0.2, "surface_temperature": "-20 degC", "ambient_temperature": "-10 degC"}),
+            "outside-table",
+            "#/surface_temperature",
         ),
         (
             pipe(),

@@ -67,3 +67,38 @@ pub fn bath() -> Value {
         "surface_temperature": "40 degC", "ambient_temperature": "20 degC",
     })
 }
+
+/// The air between two panes.
+pub fn glazing() -> Value {
+    json!({
+        "geometry": "vertical-cavity", "gap": "16 mm", "height": "1 m",
+        "emissivity_hot": 0.9, "emissivity_cold": 0.9,
+        "hot_temperature": "20 degC", "cold_temperature": "10 degC",
+    })
+}
+
+/// The air between two level plates, warm below.
+pub fn attic() -> Value {
+    json!({
+        "geometry": "horizontal-layer", "gap": "50 mm", "heated_from": "below",
+        "emissivity_hot": 0.9, "emissivity_cold": 0.9,
+        "hot_temperature": "20 degC", "cold_temperature": "10 degC",
+    })
+}
+
+/// The air between a pipe and its jacket.
+pub fn jacket() -> Value {
+    json!({
+        "geometry": "concentric-cylinders", "inner_diameter": "50 mm", "outer_diameter": "100 mm",
+        "emissivity_hot": 0.9, "emissivity_cold": 0.9,
+        "hot_temperature": "54 degC", "cold_temperature": "26 degC",
+    })
+}
+
+/// The air between two fins.
+pub fn fins() -> Value {
+    json!({
+        "geometry": "parallel-plates", "spacing": "8 mm", "height": "180 mm",
+        "heated_walls": "both", "surface_temperature": "80 degC", "ambient_temperature": "30 degC",
+    })
+}
