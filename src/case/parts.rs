@@ -295,16 +295,12 @@ pub(super) fn check_fields(
         require(fields, field, why, faults);
     }
     let unexpected = fields.given().filter(|field| {
-        let known = [DIMENSIONS, taken.required, taken.one_of, taken.optional];
-        *field != Field::Geometry && !known.iter().any(|list| list.contains(field))
+        *field != Field::Geometry
+            && !DIMENSIONS.contains(field)
+            && !taken.all().any(|known| known == *field)
     });
     for field in unexpected {
-        let names = taken
-            .required
-            .iter()
-            .chain(taken.one_of)
-            .chain(taken.optional);
-        let names: Vec<_> = names.map(|field| field.name()).collect();
+        let names: Vec<_> = taken.all().map(Field::name).collect();
         faults.push(Fault::at(
             field,
             "unexpected-field",

@@ -66,66 +66,64 @@ pub struct SpaceFields {
     pub required: &'static [Field],
     /// Fields of which exactly one must be given, where there are any.
     pub one_of: &'static [Field],
-    /// Fields that may be given.
-    pub optional: &'static [Field],
+    /// Fields that may be given: the space's own, and those of every space.
+    pub optional: [&'static [Field]; 2],
 }
+
+impl SpaceFields {
+    /// All of them.
+    pub fn all(&self) -> impl Iterator<Item = Field> {
+        let [own, common] = self.optional;
+        [self.required, self.one_of, own, common]
+            .into_iter()
+            .flatten()
+            .copied()
+    }
+}
+
+/// Fields that every space may be given.
+const COMMON: &[Field] = &[
+    Field::Fluid,
+    Field::Pressure,
+    Field::Altitude,
+    Field::Concentration,
+    Field::RelativeHumidity,
+    Field::Gravity,
+    Field::Method,
+    Field::Extrapolate,
+    Field::Id,
+];
+
+/// What is known of a surface that loses heat to a fluid.
+const HEATING: &[Field] = &[Field::SurfaceTemperature, Field::HeatFlux, Field::HeatFlow];
 
 impl Space {
     /// The fields beside a body's size.
     pub fn fields(self) -> SpaceFields {
-        const HEATING: &[Field] = &[Field::SurfaceTemperature, Field::HeatFlux, Field::HeatFlow];
         match self {
             Space::Open => SpaceFields {
                 required: &[Field::AmbientTemperature],
                 one_of: HEATING,
-                optional: &[
-                    Field::Fluid,
-                    Field::Pressure,
-                    Field::Altitude,
-                    Field::Concentration,
-                    Field::RelativeHumidity,
-                    Field::Emissivity,
-                    Field::SurroundingsTemperature,
-                    Field::DraughtSpeed,
-                    Field::DraughtDirection,
-                    Field::Clearance,
-                    Field::Gravity,
-                    Field::Method,
-                    Field::Extrapolate,
-                    Field::Id,
+                optional: [
+                    &[
+                        Field::Emissivity,
+                        Field::SurroundingsTemperature,
+                        Field::DraughtSpeed,
+                        Field::DraughtDirection,
+                        Field::Clearance,
+                    ],
+                    COMMON,
                 ],
             },
             Space::Closed => SpaceFields {
                 required: &[Field::HotTemperature, Field::ColdTemperature],
                 one_of: &[],
-                optional: &[
-                    Field::Fluid,
-                    Field::Pressure,
-                    Field::Altitude,
-                    Field::Concentration,
-                    Field::RelativeHumidity,
-                    Field::EmissivityHot,
-                    Field::EmissivityCold,
-                    Field::Gravity,
-                    Field::Method,
-                    Field::Extrapolate,
-                    Field::Id,
-                ],
+                optional: [&[Field::EmissivityHot, Field::EmissivityCold], COMMON],
             },
             Space::Channel => SpaceFields {
                 required: &[Field::AmbientTemperature],
                 one_of: HEATING,
-                optional: &[
-                    Field::Fluid,
-                    Field::Pressure,
-                    Field::Altitude,
-                    Field::Concentration,
-                    Field::RelativeHumidity,
-                    Field::Gravity,
-                    Field::Method,
-                    Field::Extrapolate,
-                    Field::Id,
-                ],
+                optional: [&[], COMMON],
             },
         }
     }

@@ -1,6 +1,6 @@
 //! The automatic choice.
 
-use super::groups::Verdict;
+use super::range::Verdict;
 
 /// Chooses among entered methods the one whose ranges the case is least outside of, the earlier of equals.
 pub fn choose<T>(entered: impl Iterator<Item = T>, verdict: impl Fn(&T) -> Verdict) -> Option<T> {

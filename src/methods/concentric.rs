@@ -5,7 +5,8 @@ use crate::geometry::Geometry::{ConcentricCylinders, ConcentricSpheres};
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
+use super::range::{Quantity, Range};
 
 const RAITHBY_HOLLANDS: Source = Source {
     authors: "Raithby, G. D.; Hollands, K. G. T.",

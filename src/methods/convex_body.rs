@@ -7,10 +7,11 @@ use crate::geometry::Geometry::{Block, LyingShortCylinder, UprightShortCylinder}
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::layers::{
     blend, turbulent_cylinder_constant, turbulent_upward_constant, turbulent_vertical_constant,
 };
+use super::range::{Quantity, Range};
 
 const HASSANI_HOLLANDS: Source = Source {
     authors: "Hassani, A. V.; Hollands, K. G. T.",

@@ -2,7 +2,8 @@
 
 use crate::geometry::{Geometry, choice};
 
-use super::groups::{Groups, Range, RangeStatus, Verdict};
+use super::groups::Groups;
+use super::range::{Range, RangeStatus, Verdict};
 
 choice! {
     /// How a surface is heated or cooled.

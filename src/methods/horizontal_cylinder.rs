@@ -5,8 +5,9 @@ use crate::geometry::Geometry::HorizontalCylinder;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::layers::{blend, f9, laminar_constant, thickened, turbulent_cylinder_constant};
+use super::range::{Quantity, Range};
 use super::sources::{CHURCHILL_CHU_CYLINDER, HANDBOOK, MCADAMS};
 
 pub static CHURCHILL_CHU: Method = Method {

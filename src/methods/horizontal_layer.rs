@@ -5,7 +5,8 @@ use crate::geometry::Geometry::HorizontalLayer;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
+use super::range::{Quantity, Range};
 use super::sources::{EN_673, HANDBOOK};
 
 /// Rayleigh number at which a layer heated from below begins to move.

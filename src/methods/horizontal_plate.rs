@@ -5,8 +5,9 @@ use crate::geometry::Geometry::HorizontalPlate;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::layers::{horizontal_stable, horizontal_unstable_blend};
+use super::range::{Quantity, Range};
 use super::sources::{HANDBOOK, MCADAMS};
 
 pub static RAITHBY_HOLLANDS_UNSTABLE: Method = Method {

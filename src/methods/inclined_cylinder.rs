@@ -5,7 +5,8 @@ use crate::geometry::Geometry::InclinedCylinder;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
+use super::range::{Quantity, Range};
 use super::sources::HANDBOOK;
 use super::{horizontal_cylinder, vertical_cylinder};
 

@@ -5,11 +5,12 @@ use crate::geometry::Geometry::InclinedPlate;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::layers::{
     blend, horizontal_stable, horizontal_unstable_blend, vertical_blend, vertical_laminar,
     vertical_turbulent,
 };
+use super::range::{Quantity, Range};
 use super::sources::{CHURCHILL_CHU_PLATE, FUJII_IMURA, HANDBOOK, VLIET};
 use super::vertical_plate;
 

@@ -17,6 +17,7 @@ mod inclined_cylinder;
 mod inclined_plate;
 mod layers;
 mod parallel_plates;
+mod range;
 mod sources;
 mod sphere;
 mod tilted_layer;
@@ -33,7 +34,8 @@ use crate::geometry::{Geometry, choice};
 pub use choice::{choose, neighbour};
 pub use entry::{Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source};
 pub use evidence::{Evidence, evidence};
-pub use groups::{Groups, Quantity, Range, RangeStatus, Verdict};
+pub use groups::Groups;
+pub use range::{Quantity, Range, RangeStatus, Verdict};
 pub use tilted_layer::step_of_ends;
 pub use vertical_cylinder::curvature_factor;
 

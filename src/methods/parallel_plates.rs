@@ -5,7 +5,8 @@ use crate::geometry::Geometry::ParallelPlates;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
+use super::range::{Quantity, Range};
 
 const BAR_COHEN_ROHSENOW: Source = Source {
     authors: "Bar-Cohen, A.; Rohsenow, W. M.",
@@ -14,6 +15,12 @@ const BAR_COHEN_ROHSENOW: Source = Source {
     locator: "116-123",
 };
 
+/// Wide channels are answered as the single walls that they tend to.
+const RANGES: &[Range] = &[
+    Range::between(Quantity::RayleighChannel, 0.0, 1e5).answered_above(),
+    Range::at_least(Quantity::Prandtl, 0.6),
+];
+
 pub static ISOTHERMAL: Method = Method {
     geometry: ParallelPlates,
     heating: Heating::Isothermal,
@@ -21,10 +28,7 @@ pub static ISOTHERMAL: Method = Method {
     automatic: true,
     formula: "Nu = (C1/E^2 + C2/E^(1/2))^(-1/2), E = Ra S/H; both walls heated 576, 2.87; one insulated 144, 2.87",
     source: BAR_COHEN_ROHSENOW,
-    ranges: &[
-        Range::between(Quantity::RayleighChannel, 0.0, 1e5).answered_above(),
-        Range::at_least(Quantity::Prandtl, 0.6),
-    ],
+    ranges: RANGES,
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
     remark: "A parabolic solution of the channel differs by +10 to -13 %, as much as the condition at the inlet does. Wide channels tend to two single walls.",
@@ -82,10 +86,7 @@ pub static UNIFORM_FLUX: Method = Method {
     automatic: true,
     formula: "Nu = (C1/E* + C2/E*^(2/5))^(-1/2), E* = Ra* S/H = E Nu, with the difference at the top edge; both walls heated 48, 2.51; one insulated 24, 2.51",
     source: BAR_COHEN_ROHSENOW,
-    ranges: &[
-        Range::between(Quantity::RayleighChannel, 0.0, 1e5).answered_above(),
-        Range::at_least(Quantity::Prandtl, 0.6),
-    ],
+    ranges: RANGES,
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
     remark: "Entered with the Rayleigh number of the top edge's difference, for which the printed form is solved.",

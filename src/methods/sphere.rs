@@ -5,8 +5,9 @@ use crate::geometry::Geometry::Sphere;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::layers::{blend, f9, turbulent_sphere_constant};
+use super::range::{Quantity, Range};
 use super::sources::HANDBOOK;
 
 pub static CHURCHILL: Method = Method {

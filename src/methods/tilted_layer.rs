@@ -5,8 +5,9 @@ use crate::geometry::Geometry::{self, TiltedLayer};
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::horizontal_layer::{GASES, gas_layer};
+use super::range::{Quantity, Range};
 use super::sources::EN_673;
 use super::vertical_cavity;
 use super::{automatic, automatic_nusselt, choose, neighbour};

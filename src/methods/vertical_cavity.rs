@@ -5,8 +5,9 @@ use crate::geometry::Geometry::VerticalCavity;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::horizontal_layer::GASES;
+use super::range::{Quantity, Range};
 use super::sources::EN_673;
 
 /// Gases between upright and leaning walls.

@@ -5,8 +5,9 @@ use crate::geometry::Geometry::VerticalCylinder;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::layers::{blend, vertical_laminar, vertical_turbulent};
+use super::range::{Quantity, Range};
 use super::sources::CHURCHILL_CHU_PLATE;
 use super::vertical_plate;
 

@@ -5,8 +5,9 @@ use crate::geometry::Geometry::VerticalPlate;
 use super::entry::{
     COMPUTED, Example, Heating, Method, ReferenceTemperature, Scatter, Side, Source,
 };
-use super::groups::{Groups, Quantity, Range};
+use super::groups::Groups;
 use super::layers::{f9, vertical_blend};
+use super::range::{Quantity, Range};
 use super::sources::{CHURCHILL_CHU_PLATE, HANDBOOK, MCADAMS, VLIET};
 
 pub static RAITHBY_HOLLANDS: Method = Method {

@@ -142,7 +142,7 @@ pub async fn list_geometries(
                 .collect(),
             required: FieldView::list(fields.required),
             one_of: FieldView::list(fields.one_of),
-            optional: FieldView::list(fields.optional),
+            optional: FieldView::list(fields.optional.into_iter().flatten()),
             example: example_request(geometry),
         }
     };
