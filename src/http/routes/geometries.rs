@@ -1,27 +1,31 @@
 //! `/v1/geometries`: the bodies and the fields that each asks for.
 
+use axum::extract::State;
 use axum::http::HeaderMap;
 use axum::response::Response;
 use serde::Serialize;
 use utoipa::ToSchema;
 use utoipa::openapi::{ObjectBuilder, Type};
 
+use crate::fluids::Fluids;
 use crate::geometry::{Field, FieldValue, Geometry, GeometryEntry};
 use crate::http::extract::AcceptsJson;
 use crate::http::openapi::example_request;
 use crate::http::problem::Problem;
 use crate::http::reply::{json, tagged};
+use crate::http::service::Service;
+use crate::methods::MethodId;
 
 /// All bodies.
 #[derive(Serialize, ToSchema)]
-pub struct Geometries {
+pub struct Geometries<'a> {
     /// Every one of them, in a fixed order.
-    geometries: Vec<GeometryView>,
+    geometries: Vec<GeometryView<'a>>,
 }
 
 /// One body.
 #[derive(Serialize, ToSchema)]
-pub struct GeometryView {
+pub struct GeometryView<'a> {
     /// Its id in requests.
     #[schema(example = "horizontal-cylinder")]
     id: &'static str,
@@ -35,13 +39,13 @@ pub struct GeometryView {
     #[schema(example = "length")]
     per_length_of: Option<&'static str>,
     /// The ways to give its size: all required fields, and at most one of the optional ones.
-    sizes: Vec<SizeView>,
+    sizes: Vec<SizeView<'a>>,
     /// Fields beside its size that must be given.
-    required: Vec<FieldView>,
+    required: Vec<FieldView<'a>>,
     /// Fields of which exactly one must be given; empty where there is no such choice.
-    one_of: Vec<FieldView>,
+    one_of: Vec<FieldView<'a>>,
     /// Fields that may be given.
-    optional: Vec<FieldView>,
+    optional: Vec<FieldView<'a>>,
     /// An example request.
     #[schema(schema_with = example_schema)]
     example: serde_json::Value,
@@ -56,16 +60,16 @@ fn example_schema() -> ObjectBuilder {
 
 /// One way to give a body's size.
 #[derive(Serialize, ToSchema)]
-pub struct SizeView {
+pub struct SizeView<'a> {
     /// All of these.
-    required: Vec<FieldView>,
+    required: Vec<FieldView<'a>>,
     /// At most one of these.
-    optional: Vec<FieldView>,
+    optional: Vec<FieldView<'a>>,
 }
 
 /// One field of a case.
 #[derive(Serialize, ToSchema)]
-pub struct FieldView {
+pub struct FieldView<'a> {
     /// Its name in requests.
     #[schema(example = "diameter")]
     name: &'static str,
@@ -86,16 +90,21 @@ pub struct FieldView {
     maximum: Option<f64>,
     /// The words it takes; empty for quantities and free texts.
     #[schema(example = json!([]))]
-    choices: Vec<&'static str>,
+    choices: Vec<&'a str>,
 }
 
-impl FieldView {
-    fn new(field: Field) -> Self {
+impl<'a> FieldView<'a> {
+    fn new(field: Field, geometry: Geometry, fluids: &'a Fluids) -> Self {
         let entry = field.entry();
-        let (kind, limits, choices): (_, _, &[&str]) = match entry.value {
-            FieldValue::Quantity(kind, limits) => (Some(kind), Some(limits), &[]),
-            FieldValue::Choice(words) => (None, None, words),
-            FieldValue::Fluid | FieldValue::Method | FieldValue::Label => (None, None, &[]),
+        let (kind, limits) = match entry.value {
+            FieldValue::Quantity(kind, limits) => (Some(kind), Some(limits)),
+            _ => (None, None),
+        };
+        let choices = match entry.value {
+            FieldValue::Choice(words) => words.to_vec(),
+            FieldValue::Fluid => fluids.iter().map(|(_, fluid)| fluid.id()).collect(),
+            FieldValue::Method => methods_of(geometry).collect(),
+            FieldValue::Quantity(..) | FieldValue::Label => Vec::new(),
         };
         FieldView {
             name: entry.name,
@@ -104,28 +113,25 @@ impl FieldView {
             unit: kind.map(|kind| kind.si_unit().symbol()),
             minimum: limits.map(|limits| limits.minimum),
             maximum: limits.map(|limits| limits.maximum),
-            choices: choices.to_vec(),
+            choices,
         }
-    }
-
-    fn list<'a>(fields: impl IntoIterator<Item = &'a Field>) -> Vec<Self> {
-        fields
-            .into_iter()
-            .map(|&field| FieldView::new(field))
-            .collect()
     }
 }
 
-/// All bodies and the fields that each asks for.
-#[utoipa::path(
-    get, path = "/v1/geometries", operation_id = "list_geometries", tag = "catalogue",
-    responses((status = 200, description = "all bodies", body = Geometries))
-)]
-pub async fn list_geometries(
-    _accepts: AcceptsJson,
-    headers: HeaderMap,
-) -> Result<Response, Problem> {
-    let view = |(geometry, entry): (Geometry, &'static GeometryEntry)| {
+/// `auto` and the methods of a body.
+fn methods_of(geometry: Geometry) -> impl Iterator<Item = &'static str> {
+    let methods = MethodId::ALL
+        .iter()
+        .filter(move |id| id.method().geometry == geometry);
+    std::iter::once("auto").chain(methods.map(|id| id.as_str()))
+}
+
+impl<'a> GeometryView<'a> {
+    fn new(geometry: Geometry, entry: &'static GeometryEntry, fluids: &'a Fluids) -> Self {
+        let list = |fields: &[Field]| {
+            let view = |&field: &Field| FieldView::new(field, geometry, fluids);
+            fields.iter().map(view).collect::<Vec<_>>()
+        };
         let fields = entry.space.fields();
         GeometryView {
             id: geometry.as_str(),
@@ -136,16 +142,30 @@ pub async fn list_geometries(
                 .forms
                 .iter()
                 .map(|form| SizeView {
-                    required: FieldView::list(form.required),
-                    optional: FieldView::list(form.optional),
+                    required: list(form.required),
+                    optional: list(form.optional),
                 })
                 .collect(),
-            required: FieldView::list(fields.required),
-            one_of: FieldView::list(fields.one_of),
-            optional: FieldView::list(fields.optional.into_iter().flatten()),
+            required: list(fields.required),
+            one_of: list(fields.one_of),
+            optional: list(&fields.optional.concat()),
             example: example_request(geometry),
         }
-    };
-    let geometries = Geometry::all().map(view).collect();
+    }
+}
+
+/// All bodies and the fields that each asks for.
+#[utoipa::path(
+    get, path = "/v1/geometries", operation_id = "list_geometries", tag = "catalogue",
+    responses((status = 200, description = "all bodies", body = Geometries))
+)]
+pub async fn list_geometries(
+    State(service): State<Service>,
+    _accepts: AcceptsJson,
+    headers: HeaderMap,
+) -> Result<Response, Problem> {
+    let geometries = Geometry::all()
+        .map(|(geometry, entry)| GeometryView::new(geometry, entry, service.fluids))
+        .collect();
     Ok(tagged(json(&Geometries { geometries })?, &headers))
 }
