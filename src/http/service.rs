@@ -3,6 +3,7 @@
 use std::time::Duration;
 
 use crate::fluids::Fluids;
+use crate::methods::registry_digest;
 
 /// What a request may take.
 #[derive(Clone, Copy, Debug)]
@@ -32,8 +33,9 @@ pub struct Service {
 }
 
 impl Service {
-    /// These fluids, with these limits.
+    /// These fluids, with these limits. The registry's digest evaluates every method once, so that the first request finds their tables made.
     pub fn new(fluids: &'static Fluids, limits: RequestLimits) -> Self {
+        registry_digest();
         Service { fluids, limits }
     }
 }
