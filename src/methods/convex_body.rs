@@ -27,7 +27,7 @@ const YOVANOVICH: Source = Source {
     locator: "On the effect of shape, aspect ratio and orientation",
 };
 
-const BLEND_REMARK: &str = "Yovanovich's laminar part beside the turbulent constants of Raithby and Hollands 1998, averaged by area: the idea of the source, not its own constants. Above Ra 1e9 a large body is better taken face by face.";
+const BLEND_REMARK: &str = "Yovanovich's laminar part beside the turbulent constants of Raithby and Hollands 1998, averaged by area: the idea of the source, not its own constants. For blocks of far from square base the conduction limit is up to 14 % off a computed one. Above Ra 1e9 a large body is better taken face by face.";
 
 /// The whole-body methods of one geometry differ in their shape alone.
 macro_rules! whole_body {

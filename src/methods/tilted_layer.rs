@@ -63,7 +63,7 @@ pub static ELSHERBINY: Method = Method {
     ],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
-    remark: "Also in ISO 15099. At 60 degrees within +14 to -6 % of the method for smaller tilts up to Ra 1e5, 23 to 35 % apart at 1e6 to 1e7.",
+    remark: "Also in ISO 15099. At 60 degrees within +14 to -6 % of the method for smaller tilts up to Ra 1e5 (+19 % at H/L 12), 23 to 35 % apart at 1e6 to 1e7.",
     example: Example {
         groups: Groups::new(5e4, 0.71).with_aspect(40.0).tilted(75.0),
         nusselt: 2.5945,

@@ -95,7 +95,7 @@ pub static CATTON: Method = Method {
     ],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
-    remark: "Against computed cavities +1 to +5 % at H/L 2, -4 to -11 % at H/L 5 to 10 (Pr 0.71), -1 to -9 % (Pr 7). Nu is at least 1.",
+    remark: "Against computed cavities at H/L 2 -3 to +1 % (Pr 0.71) and +1 to +5 % (Pr 7), at H/L 5 to 10 -4 to -11 % (Pr 0.71) and -9 to +2 % (Pr 7). Nu is at least 1.",
     example: Example {
         groups: Groups::new(1e6, 6.0).with_aspect(5.0),
         nusselt: 6.97739,

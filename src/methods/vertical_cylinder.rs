@@ -30,7 +30,7 @@ pub static POPIEL: Method = Method {
     ],
     reference: ReferenceTemperature::Film,
     scatter: Scatter::CommonPractice,
-    remark: "K is a fit to Cebeci's 1974 boundary-layer solution; the plate's layers are those of Raithby and Hollands 1998. Below Ra 100 K is held, since the fit grows without bound as Ra tends to 0.",
+    remark: "K is a fit to Cebeci's 1974 boundary-layer solution, of which it lies within -2.8 to +1.3 % at Pr 0.7 to 6 and +0.5 to +2.6 % at Pr 100, to a bracket of 10; the plate's layers are those of Raithby and Hollands 1998. Below Ra 100 K is held, since the fit grows without bound as Ra tends to 0.",
     example: Example {
         groups: SLENDER,
         nusselt: 68.3009,
