@@ -271,6 +271,11 @@ fn a_flood_of_faults_is_cut_short() {
     let faults = reply.faults();
     assert_eq!(faults.len(), 101);
     assert_eq!(faults[100], ("#".to_owned(), "too-many-faults".to_owned()));
+    let rows = vec!["x"; 5000];
+    let table = json!({"temperature": rows, "density": rows});
+    let faults = post(&with(pipe(), "fluid", table)).faults();
+    assert!(faults.len() < 110, "{}", faults.len());
+    assert!(faults.iter().any(|(_, code)| code == "too-many-faults"));
 }
 
 #[test]

@@ -55,6 +55,7 @@ pub fn read_film_body(bytes: &[u8]) -> Result<FilmInput<'_>, Problem> {
     if let Some(raw) = own_table {
         input.own_fluid = read_own_table(raw, &input.units, &mut input.faults);
         input.bad_own_fluid = input.own_fluid.is_none();
+        input.is_hopeless();
     }
     Ok(input)
 }

@@ -6,6 +6,7 @@ use crate::case::{Fault, Given, duplicate_field, unknown_field};
 use crate::fluids::{Fluid, OwnTable, Phase};
 use crate::quantity::{Kind, UnitChoice, parse};
 
+use super::MOST_FAULTS;
 use super::json::{read_members, read_value};
 
 /// The id under which a request's own table goes.
@@ -149,6 +150,9 @@ fn read_column(
     let before = faults.len();
     let mut values = Vec::with_capacity(rows.len());
     for (row, raw) in rows.into_iter().enumerate() {
+        if faults.len() >= MOST_FAULTS {
+            break;
+        }
         let number = row.to_string();
         let given = read_value(raw).unwrap_or(Given::Other("null"));
         match read_number(&["fluid", name, &number], kind, given, units) {
