@@ -37,6 +37,10 @@ pub struct Heat {
 pub struct DraughtResult {
     /// Richardson number, Grashof over the square of Reynolds, on the body's own length.
     pub richardson: f64,
+    /// Reynolds number that the forced method is entered with.
+    pub reynolds: f64,
+    /// Prandtl number that it is entered with.
+    pub prandtl: f64,
     /// Coefficient of the draught alone.
     pub forced_coefficient: f64,
     /// Coefficient of free convection and draught together.

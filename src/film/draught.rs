@@ -73,6 +73,8 @@ pub(super) fn combine(
             * difference
             * case.size.characteristic_length
             / draught.speed.powi(2),
+        reynolds,
+        prandtl: state.prandtl(),
         forced_coefficient: forced,
         combined_coefficient: combined + rest.min(free),
         cancels: opposing && moved.min(rising) > CANCELLATION * large,

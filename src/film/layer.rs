@@ -80,7 +80,7 @@ impl<'a> Layer<'a> {
         })
     }
 
-    /// The methods that serve it, the body's usual one first.
+    /// The methods that serve it, in the order of the registry.
     pub fn methods(&self) -> &'static [MethodId] {
         MethodId::serving(self.case.geometry, self.case.heating(), self.side)
     }

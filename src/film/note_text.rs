@@ -6,6 +6,7 @@ use crate::geometry::{Field, Space};
 use crate::methods::{Groups, Quantity, curvature_factor};
 use crate::quantity::{Kind, Unit};
 
+use super::draught::forced_part;
 use super::notes::layer_thickness;
 
 /// A note as a caller reads it.
@@ -109,7 +110,7 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
             fluid.name(),
             if case.emissivity.is_some() { " and radiation" } else { "" }
         ),
-        NoteCode::DraughtMatters | NoteCode::DraughtGoverns => draught_text(code, answer),
+        NoteCode::DraughtMatters | NoteCode::DraughtGoverns => draught_text(code, case, answer),
         NoteCode::Confined => format!(
             "The clearance is smaller than the layer, about {:.1e} m thick: a wall or neighbour hinders it, and the figures for an open body are only a guide.",
             layer_thickness(answer)
@@ -181,8 +182,8 @@ fn text(code: NoteCode, case: &Case, answer: &Answer, fluids: &Fluids) -> String
     }
 }
 
-fn draught_text(code: NoteCode, answer: &Answer) -> String {
-    let Some(draught) = answer.draught else {
+fn draught_text(code: NoteCode, case: &Case, answer: &Answer) -> String {
+    let (Some(draught), Some(given)) = (answer.draught, case.draught) else {
         return String::new();
     };
     if draught.cancels {
@@ -196,8 +197,18 @@ fn draught_text(code: NoteCode, answer: &Answer) -> String {
     } else {
         "is not small against free convection"
     };
+    let (method, _) = forced_part(case, given);
+    let breaches = method.breaches(draught.reynolds, draught.prandtl);
+    let outside = if breaches.is_empty() {
+        String::new()
+    } else {
+        format!(
+            " The method for the draught is outside its range: {}.",
+            breaches.join(", ")
+        )
+    };
     format!(
-        "Richardson number {:.2e}: the draught {weight}; the flows use the combined coefficient, {:.3} W/(m2 K).",
+        "Richardson number {:.2e}: the draught {weight}; the flows use the combined coefficient, {:.3} W/(m2 K).{outside}",
         draught.richardson, draught.combined_coefficient
     )
 }

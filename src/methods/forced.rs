@@ -2,6 +2,51 @@
 
 use super::entry::Source;
 
+/// The band of one quantity in which a method holds, both ends included.
+#[derive(Clone, Copy, Debug)]
+pub struct FlowRange {
+    /// What is bounded, as people write it.
+    pub symbol: &'static str,
+    /// Its value from Reynolds and Prandtl numbers.
+    pub of: fn(f64, f64) -> f64,
+    /// Lower end.
+    pub minimum: f64,
+    /// Upper end, infinite where there is none.
+    pub maximum: f64,
+}
+
+const fn reynolds(minimum: f64, maximum: f64) -> FlowRange {
+    FlowRange {
+        symbol: "Re",
+        of: |reynolds, _| reynolds,
+        minimum,
+        maximum,
+    }
+}
+
+const fn prandtl(minimum: f64, maximum: f64) -> FlowRange {
+    FlowRange {
+        symbol: "Pr",
+        of: |_, prandtl| prandtl,
+        minimum,
+        maximum,
+    }
+}
+
+impl FlowRange {
+    /// What is outside in words, if the flow is.
+    fn breach(&self, reynolds: f64, prandtl: f64) -> Option<String> {
+        let (symbol, value) = (self.symbol, (self.of)(reynolds, prandtl));
+        if value < self.minimum {
+            Some(format!("{symbol} is {value:.3}, below {}", self.minimum))
+        } else if value > self.maximum {
+            Some(format!("{symbol} is {value:.3e}, above {:e}", self.maximum))
+        } else {
+            None
+        }
+    }
+}
+
 /// A published method for flow past a body.
 #[derive(Clone, Copy, Debug)]
 pub struct Forced {
@@ -11,6 +56,8 @@ pub struct Forced {
     pub formula: &'static str,
     /// Where it was published.
     pub source: Source,
+    /// Where it holds.
+    pub ranges: &'static [FlowRange],
     /// Whether properties are those of the stream instead of the film.
     pub stream_properties: bool,
     /// Nusselt number from Reynolds and Prandtl numbers and the viscosity of the stream over that at the surface.
@@ -19,7 +66,15 @@ pub struct Forced {
     pub at_rest: f64,
 }
 
-/// Flow along a plate.
+impl Forced {
+    /// What of a flow lies outside the method's ranges, in words; empty when nothing does.
+    pub fn breaches(&self, reynolds: f64, prandtl: f64) -> Vec<String> {
+        let breach = |range: &FlowRange| range.breach(reynolds, prandtl);
+        self.ranges.iter().filter_map(breach).collect()
+    }
+}
+
+/// Flow along a plate; the ranges are those of handbooks, from memory.
 pub static PLATE: Forced = Forced {
     body: "plate along the flow",
     formula: "Nu = 0.664 Re^(1/2) Pr^(1/3) to Re 5e5, (0.037 Re^0.8 - 871) Pr^(1/3) beyond",
@@ -29,6 +84,7 @@ pub static PLATE: Forced = Forced {
         work: "Z. angew. Math. Mech. 1",
         locator: "115-121, as in handbooks",
     },
+    ranges: &[reynolds(0.0, 1e8), prandtl(0.6, 60.0)],
     stream_properties: false,
     nusselt: |reynolds, prandtl, _| {
         let layer = if reynolds <= 5e5 {
@@ -41,7 +97,7 @@ pub static PLATE: Forced = Forced {
     at_rest: 0.0,
 };
 
-/// Flow across a cylinder.
+/// Flow across a cylinder; Re Pr from 0.2 by the source, data to Re 1e7 (from memory).
 pub static CYLINDER: Forced = Forced {
     body: "cylinder across the flow",
     formula: "Nu = 0.3 + 0.62 Re^(1/2) Pr^(1/3)/[1 + (0.4/Pr)^(2/3)]^(1/4) [1 + (Re/282000)^(5/8)]^(4/5)",
@@ -51,6 +107,15 @@ pub static CYLINDER: Forced = Forced {
         work: "J. Heat Transfer 99",
         locator: "300-306",
     },
+    ranges: &[
+        FlowRange {
+            symbol: "Re Pr",
+            of: |reynolds, prandtl| reynolds * prandtl,
+            minimum: 0.2,
+            maximum: f64::INFINITY,
+        },
+        reynolds(0.0, 1e7),
+    ],
     stream_properties: false,
     nusselt: |reynolds, prandtl, _| {
         let layer = 0.62 * reynolds.sqrt() * prandtl.cbrt()
@@ -60,7 +125,7 @@ pub static CYLINDER: Forced = Forced {
     at_rest: 0.0,
 };
 
-/// Flow past a sphere.
+/// Flow past a sphere; the source's ranges, from memory; its Pr from 0.71 is for gases and above.
 pub static SPHERE: Forced = Forced {
     body: "sphere in the flow",
     formula: "Nu = 2 + (0.4 Re^(1/2) + 0.06 Re^(2/3)) Pr^0.4 (mu_stream/mu_surface)^(1/4), properties of the stream",
@@ -70,6 +135,7 @@ pub static SPHERE: Forced = Forced {
         work: "AIChE Journal 18",
         locator: "361-371",
     },
+    ranges: &[reynolds(3.5, 7.6e4), prandtl(0.6, 380.0)],
     stream_properties: true,
     nusselt: |reynolds, prandtl, viscosity_ratio| {
         let layer = 0.4 * reynolds.sqrt() + 0.06 * reynolds.powf(2.0 / 3.0);
@@ -99,6 +165,15 @@ mod tests {
                 forced.body
             );
         }
+    }
+
+    #[test]
+    fn breaches_are_told_and_only_then() {
+        assert!(SPHERE.breaches(1e4, 0.7).is_empty());
+        assert_eq!(SPHERE.breaches(1.0, 0.7), ["Re is 1.000, below 3.5"]);
+        assert_eq!(SPHERE.breaches(1e5, 500.0).len(), 2);
+        assert!(CYLINDER.breaches(0.2, 0.7)[0].starts_with("Re Pr is 0.140"));
+        assert!(PLATE.breaches(1e9, 0.7)[0].ends_with("above 1e8"));
     }
 
     #[test]

@@ -191,7 +191,7 @@ fn automatic_nusselt(geometry: Geometry, side: Side, groups: &Groups) -> f64 {
         .map_or(1.0, |method| (method.nusselt)(groups))
 }
 
-/// Digest of everything the registry says of its methods: ids, formulas, sources, ranges and examples.
+/// Digest of everything that figures rest on: ids in their order, formulas, sources, ranges and examples of the methods, and what is said of the forced parts.
 pub fn registry_digest() -> &'static str {
     static DIGEST: LazyLock<String> = LazyLock::new(|| {
         let mut text = String::new();
@@ -205,11 +205,12 @@ pub fn registry_digest() -> &'static str {
             // Writing to a String does not fail.
             let _ = writeln!(
                 text,
-                "{} {:?} {:?} {:?} {} {:?} {:?} {:?} {:?} {:?}",
+                "{} {:?} {:?} {:?} {} {} {:?} {:?} {:?} {:?} {:?}",
                 id.as_str(),
                 m.geometry,
                 m.heating,
                 m.side,
+                m.automatic,
                 m.formula,
                 m.source,
                 m.ranges,
@@ -217,6 +218,10 @@ pub fn registry_digest() -> &'static str {
                 m.scatter,
                 example
             );
+        }
+        for part in [&forced::PLATE, &forced::CYLINDER, &forced::SPHERE] {
+            let nusselt = (part.nusselt)(1e4, 1.0, 1.0);
+            let _ = writeln!(text, "{} {:?} {nusselt}", part.formula, part.source);
         }
         sha256(text.as_bytes())
     });

@@ -570,6 +570,21 @@ fn a_draught_raises_the_loss() {
     assert_eq!(blown["notes"][0]["code"], "draught-governs");
     let flux = |answer: &Value| answer["total_heat_flux"].as_f64().unwrap();
     assert!((flux(&blown) / flux(&still) - 1.53).abs() < 0.01);
+
+    let ball = json!({
+        "geometry": "sphere", "diameter": 0.5, "surface_temperature": "90 degC",
+        "ambient_temperature": "20 degC", "emissivity": 0.9, "draught_speed": "10 m/s",
+    });
+    let text = post(&ball).text;
+    assert!(
+        text.contains("outside its range: Re is") && text.contains("above 7.6e4"),
+        "{text}"
+    );
+    assert!(
+        !post(&with(pipe(), "draught_speed", json!("2 m/s")))
+            .text
+            .contains("outside its range")
+    );
 }
 
 #[test]
